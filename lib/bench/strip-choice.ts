@@ -1,26 +1,16 @@
 /** Which strips a person has standing, and in what order: kept in the browser. */
-
-export const stripIds = [
-  "response",
-  "air-speed",
-  "excursion",
-  "impedance",
-  "group-delay",
-  "max-level",
-] as const;
-export type StripId = (typeof stripIds)[number];
+import { DEFAULT_STRIPS, STRIP_IDS, type StripId } from "@/lib/charts/strips";
 
 const KEY = "ventwright.strips";
-export const usualStrips: StripId[] = ["response", "air-speed", "excursion", "impedance"];
 
-export function readStripChoice(): StripId[] {
+export function readStripChoice(): readonly StripId[] {
   try {
     const kept: unknown = JSON.parse(window.localStorage.getItem(KEY) ?? "null");
-    if (!Array.isArray(kept)) return usualStrips;
-    const known = kept.filter((id): id is StripId => stripIds.some((strip) => strip === id));
-    return known.length > 0 ? [...new Set(known)] : usualStrips;
+    if (!Array.isArray(kept)) return DEFAULT_STRIPS;
+    const known = kept.filter((id): id is StripId => STRIP_IDS.some((strip) => strip === id));
+    return known.length > 0 ? [...new Set(known)] : DEFAULT_STRIPS;
   } catch {
-    return usualStrips;
+    return DEFAULT_STRIPS;
   }
 }
 

@@ -4,6 +4,9 @@
  * physical range is refused with the range said (see errors.ts).
  */
 import { z } from "zod";
+import { seriesPerString } from "./series-parallel";
+
+export { seriesPerString };
 
 const within = (min: number, max: number) => z.number().min(min).max(max);
 const above = (min: number, max: number) => z.number().gt(min).max(max);
@@ -54,13 +57,6 @@ export const driverSchema = z
         "Series-parallel needs a count that makes equal strings of two or more: 4, 6, 8, 9, 10, 12 …",
     },
   );
-
-/** Drivers in series in each string of a series-parallel array: the largest divisor ≤ √count; null where there is none above 1. */
-export function seriesPerString(count: number): number | null {
-  for (let divisor = Math.floor(Math.sqrt(count)); divisor > 1; divisor--)
-    if (count % divisor === 0) return divisor;
-  return null;
-}
 
 export const enclosureSchema = z.strictObject({
   net_volume_m3: within(1e-5, 100),

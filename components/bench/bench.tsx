@@ -1,0 +1,70 @@
+"use client";
+
+import { useEffect, useState, type ReactNode } from "react";
+import { BenchHeader } from "./bench-header";
+import { BoreMapPanel } from "./bore-map-panel";
+import { CurvesRegion } from "./curves-region";
+import { DrawingRegion } from "./drawing-region";
+import { JigPanel } from "./jig-panel";
+import { KeyFigures } from "./key-figures";
+import { MarginsList } from "./margins-list";
+import { NumbersColumn } from "./numbers/numbers-column";
+import { RingStack } from "./ring-stack";
+import { useUndoKeys } from "./use-undo-keys";
+
+interface BenchProps {
+  canEdit: boolean;
+  state: ReactNode;
+  actions: ReactNode;
+  /** For the title block. */
+  revision: string;
+  drawn: string;
+}
+
+/**
+ * One design, worked: numbers, section drawing over curves, margins. The drawing answers first;
+ * what is heavier is fetched once it does.
+ */
+export function Bench({ canEdit, state, actions, revision, drawn }: BenchProps) {
+  useUndoKeys();
+  const ready = useDrawingReady();
+  return (
+    <div className="bench" data-ready={ready} data-can-edit={canEdit}>
+      <BenchHeader canEdit={canEdit} state={state} actions={actions} />
+      <KeyFigures />
+      <div className="bench-regions">
+        <fieldset className="bench-numbers" disabled={!canEdit}>
+          <legend className="sr-only">Numbers of the design</legend>
+          <NumbersColumn />
+        </fieldset>
+        <div className="bench-middle">
+          <DrawingRegion revision={revision} drawn={drawn} />
+          <CurvesRegion ready={ready} />
+        </div>
+        <div className="bench-margins">
+          <MarginsList />
+          {ready && (
+            <>
+              <RingStack />
+              <BoreMapPanel />
+              <JigPanel />
+            </>
+          )}
+        </div>
+      </div>
+    </div>
+  );
+}
+
+/** True once the drawing has been painted and listens; the mark is what the bench measures. */
+function useDrawingReady(): boolean {
+  const [ready, setReady] = useState(false);
+  useEffect(() => {
+    const frame = requestAnimationFrame(() => {
+      performance.mark("ventwright:bench-ready");
+      setReady(true);
+    });
+    return () => cancelAnimationFrame(frame);
+  }, []);
+  return ready;
+}
