@@ -1,0 +1,36 @@
+/** How the client reads and writes designs: TanStack Query options over the routes. */
+import { infiniteQueryOptions } from "@tanstack/react-query";
+import type { Design } from "@/lib/document/schema";
+import { ask } from "@/lib/platform/ask";
+import type { DesignPage, SavedDesign } from "./contract";
+
+export const designsKey = ["designs"] as const;
+
+export function designsQuery() {
+  return infiniteQueryOptions({
+    queryKey: designsKey,
+    queryFn: ({ pageParam, signal }) =>
+      ask<DesignPage>(`/api/designs${pageParam ? `?after=${encodeURIComponent(pageParam)}` : ""}`, {
+        signal,
+      }),
+    initialPageParam: null as string | null,
+    getNextPageParam: (page) => page.next,
+  });
+}
+
+export const createDesign = (document: Design) =>
+  ask<SavedDesign>("/api/designs", { method: "POST", body: { document } });
+
+export const saveDesign = (id: string, version: number, document: Design) =>
+  ask<SavedDesign>(`/api/designs/${id}`, { method: "PUT", body: { version, document } });
+
+export const renameDesign = (id: string, name: string) =>
+  ask<SavedDesign>(`/api/designs/${id}`, { method: "PATCH", body: { name } });
+
+export const deleteDesign = (id: string) => ask<null>(`/api/designs/${id}`, { method: "DELETE" });
+
+export const restoreDesign = (id: string) =>
+  ask<SavedDesign>(`/api/designs/${id}/restore`, { method: "POST" });
+
+export const duplicateDesign = (id: string) =>
+  ask<SavedDesign>(`/api/designs/${id}/duplicate`, { method: "POST" });
