@@ -5,8 +5,6 @@
  */
 import localFont from "next/font/local";
 
-const stretch = { prop: "font-stretch", value: "62% 125%" };
-
 export const archivo = localFont({
   src: "../../node_modules/@fontsource-variable/archivo/files/archivo-latin-wdth-normal.woff2",
   variable: "--font-archivo",
@@ -15,7 +13,7 @@ export const archivo = localFont({
   preload: true,
   adjustFontFallback: false,
   declarations: [
-    stretch,
+    { prop: "font-stretch", value: "62% 125%" },
     {
       prop: "unicode-range",
       value:
@@ -32,7 +30,7 @@ export const archivoExtended = localFont({
   preload: false,
   adjustFontFallback: false,
   declarations: [
-    stretch,
+    { prop: "font-stretch", value: "62% 125%" },
     {
       prop: "unicode-range",
       value:
