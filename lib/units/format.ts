@@ -81,7 +81,7 @@ function write(
     digits === undefined || onTape ? shown.places(Math.abs(figure)) : digits + (inInches ? 1 : 0);
   const plain = Math.abs(figure).toFixed(places);
   const rounded = Math.sign(figure) * Number(plain);
-  const words = shown.trim && digits === undefined ? trimmed(plain) : plain;
+  const words = (shown.trim && digits === undefined) || figure === 0 ? trimmed(plain) : plain;
   return { value: sign(rounded, signed) + words, figure: rounded };
 }
 
