@@ -19,6 +19,18 @@ export default defineConfig({
         resolve: { alias },
         test: { name: "reference", include: ["tests/reference/**/*.test.ts"], environment: "node" },
       },
+      {
+        resolve: { alias },
+        test: {
+          name: "integration",
+          include: ["tests/integration/**/*.test.ts"],
+          environment: "node",
+          setupFiles: ["tests/integration/support/quiet.ts"],
+          globalSetup: ["tests/integration/support/template.ts"],
+          hookTimeout: 30_000,
+          testTimeout: 30_000,
+        },
+      },
     ],
   },
 });
