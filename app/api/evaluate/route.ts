@@ -1,0 +1,4 @@
+import { answerCommand } from "@/lib/document/answer-command";
+import { route } from "@/lib/platform/route";
+
+export const POST = route(({ request }) => answerCommand("evaluate", request));
