@@ -5,19 +5,31 @@
 import { existsSync, mkdirSync, mkdtempSync, readFileSync, rmSync } from "node:fs";
 import { spawn } from "node:child_process";
 import { dirname, join } from "node:path";
-import { fail, isRoot, next, projectRoot, requireBuild, requirePackages, run, say, start, tsx, untilHealthy } from "./shell.mjs";
+import {
+  fail,
+  isRoot,
+  next,
+  projectRoot,
+  requireBuild,
+  requirePackages,
+  run,
+  say,
+  start,
+  tsx,
+  untilHealthy,
+} from "./shell.mjs";
 
 process.env.NEXT_TELEMETRY_DISABLED = "1";
 const PARTS = ["validate", "unit", "reference", "integration", "e2e"];
 const asked = process.argv.slice(2);
 const unknown = asked.filter((part) => !PARTS.includes(part));
-if (unknown.length > 0) fail(`There is no part called ${unknown.join(", ")}. Parts: ${PARTS.join(", ")}.`);
+if (unknown.length > 0)
+  fail(`There is no part called ${unknown.join(", ")}. Parts: ${PARTS.join(", ")}.`);
 const parts = asked.length > 0 ? asked : PARTS;
 
 requirePackages();
-const { freePort, makeDatabase, newPassword, startCluster, throwawayFolder } = await import(
-  "./database.mjs"
-);
+const { freePort, makeDatabase, newPassword, startCluster, throwawayFolder } =
+  await import("./database.mjs");
 
 const results = mkdtempSync(join(process.env.TMPDIR ?? "/tmp", "ventwright-results-"));
 const stops = [() => rmSync(results, { recursive: true, force: true })];
