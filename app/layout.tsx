@@ -2,6 +2,10 @@ import type { Metadata, Viewport } from "next";
 import { cookies } from "next/headers";
 import type { ReactNode } from "react";
 import { archivo, archivoExtended } from "@/components/shell/fonts";
+import { Footer } from "@/components/shell/footer";
+import { Header } from "@/components/shell/header";
+import { Providers } from "@/components/shell/providers";
+import { currentSession } from "@/lib/accounts/session";
 import { PREFERENCES_COOKIE, readSessionPreferences } from "@/lib/units/session-preferences";
 import "./globals.css";
 
@@ -22,8 +26,9 @@ export const viewport: Viewport = {
 };
 
 export default async function RootLayout({ children }: { children: ReactNode }) {
-  const jar = await cookies();
-  const preferences = readSessionPreferences(jar.get(PREFERENCES_COOKIE)?.value);
+  const session = await currentSession();
+  const cookie = (await cookies()).get(PREFERENCES_COOKIE)?.value;
+  const preferences = session?.person.preferences ?? readSessionPreferences(cookie);
   return (
     <html
       lang="en"
@@ -31,13 +36,18 @@ export default async function RootLayout({ children }: { children: ReactNode }) 
       data-theme={preferences.theme === "system" ? undefined : preferences.theme}
     >
       <body className="flex min-h-dvh flex-col">
-        <a
-          href="#main"
-          className="fixed top-2 left-2 z-50 -translate-y-20 rounded-sm bg-ink px-3 py-2 text-film focus:translate-y-0"
-        >
+        <a href="#main" className="skip-link">
           Skip to the content
         </a>
-        {children}
+        <Providers
+          key={session?.person.id ?? "visitor"}
+          preferences={preferences}
+          signedIn={session !== null}
+        >
+          <Header account={session && { person: session.person.name, shop: session.shop.name }} />
+          {children}
+          <Footer />
+        </Providers>
       </body>
     </html>
   );
