@@ -35,6 +35,7 @@ export interface BoreField {
   ventIndex: number;
   tuning_hz: number;
   size: number;
+  /** Whether there is a driver and a drive, so that there are air speeds. */
   hasDriver: boolean;
   diameters_m: Float64Array;
   counts: number[];
@@ -111,7 +112,7 @@ export function boreField(
     ventIndex,
     tuning_hz: tuning,
     size,
-    hasDriver: design.driver !== null,
+    hasDriver: design.driver !== null && design.drive.voltage_v > 0,
     diameters_m,
     counts,
     flares,

@@ -5,7 +5,7 @@ import type { AirProperties, VentModel } from "@/lib/acoustics/vent-model";
 import type { AirwayVent, Design } from "@/lib/document/schema";
 import { pieceLength } from "@/lib/acoustics/airway";
 import { candidateVent, widestOutside, type CandidateBase, type CandidateShape } from "./candidate";
-import { network, type Network } from "./network";
+import { peakSearch, peakSpeed, type PeakSearch } from "./network";
 import { airProperties } from "@/lib/acoustics/air";
 
 const TAU = 2 * Math.PI;
@@ -29,7 +29,8 @@ export interface SolveContext {
   air: AirProperties;
   options: { vent_losses: boolean };
   tuning_hz: number;
-  net: Network | null;
+  /** Null without a driver or a drive: there is no level then. */
+  peak: PeakSearch | null;
   /** What one vent's inner end must let through at the tuning, times count [m³/(s·Pa)]. */
   susceptance: number;
 }
@@ -65,7 +66,10 @@ export function solveContext(
     options,
     tuning_hz,
     susceptance,
-    net: design.driver ? network(design, design.driver, air, others, tuning_hz) : null,
+    peak:
+      design.driver && design.drive.voltage_v > 0
+        ? peakSearch(design, design.driver, air, others, tuning_hz, 1 / (w * susceptance))
+        : null,
   };
 }
 
@@ -141,23 +145,19 @@ function solveLength(context: SolveContext, shape: CandidateShape, guess_m: numb
   };
   if (longest <= shortest) {
     const free = root((x) => excess(x, true), shortest, 20, guess_m || wanted);
-    return free === null
-      ? nothing(TOO_SHORT)
-      : figures(context, shape, vent, model, room, TOO_LONG);
+    return free === null ? nothing(TOO_SHORT) : figures(context, vent, model, room, TOO_LONG);
   }
   const start = guess_m || wanted - 0.8 * shape.diameter_m;
   if (start < longest || !Number.isFinite(longest)) {
     const met = root((x) => excess(x, false), shortest, Math.min(longest, 20), start);
-    if (met !== null) return figures(context, shape, vent, model, room, FITS);
+    if (met !== null) return figures(context, vent, model, room, FITS);
   } else if (excess(longest, false) > 0) {
     const met = root((x) => excess(x, false), shortest, longest, longest);
-    if (met !== null) return figures(context, shape, vent, model, room, FITS);
+    if (met !== null) return figures(context, vent, model, room, FITS);
   }
   if (excess(shortest, false) > 0) return nothing(TOO_SHORT);
   const free = root((x) => excess(x, true), shortest, 20, Math.max(start, longest));
-  return free === null
-    ? nothing(NOT_BUILDABLE)
-    : figures(context, shape, vent, model, room, TOO_LONG);
+  return free === null ? nothing(NOT_BUILDABLE) : figures(context, vent, model, room, TOO_LONG);
 }
 
 /** A wall this far away is not felt [m]. */
@@ -189,7 +189,6 @@ function root(f: (x: number) => number, low: number, high: number, start: number
 
 function figures(
   context: SolveContext,
-  shape: CandidateShape,
   vent: AirwayVent,
   model: VentModel,
   room: number,
@@ -197,7 +196,7 @@ function figures(
 ): Solved {
   const overall = model.figures.overall_length_m;
   const tube = vent.pieces.find((piece) => piece.kind === "tube");
-  const peak = context.net ? peakSpeed(context.net, model, shape.count) : { speed: 0, at: 0 };
+  const peak = context.peak ? peakSpeed(context.peak, model) : null;
   return {
     state,
     tube_length_m: tube?.kind === "tube" ? tube.length_m : 0,
@@ -207,39 +206,7 @@ function figures(
         ? vent.clearance_m
         : Math.min(room - overall, FAR_M),
     pipe_resonance_hz: model.figures.pipe_resonances_hz[0] ?? 0,
-    peak_air_speed_m_s: peak.speed,
-    peak_frequency_hz: peak.at,
+    peak_air_speed_m_s: peak?.speed_m_s ?? 0,
+    peak_frequency_hz: peak?.frequency_hz ?? 0,
   };
-}
-
-/** Frequencies beside a peak of the lossless flow, in ratio to it. */
-const AROUND = [0.93, 0.965, 1, 1.035, 1.075];
-
-/** Peak air speed, mean over the bore [m/s]: the lossless peaks put right for this vent's losses by a parabola in log f. */
-function peakSpeed(net: Network, model: VentModel, count: number): { speed: number; at: number } {
-  const hz = net.peaks_hz.flatMap((f) => AROUND.map((ratio) => f * ratio));
-  const w = Float64Array.from(hz, (f) => TAU * f);
-  const flow = new Float64Array(w.length);
-  net.ventFlow(w, model.respond(w), count, flow);
-  let best = 0;
-  flow.forEach((value, i) => {
-    if (value > flow[best]!) best = i;
-  });
-  const [first, size] = [Math.floor(best / AROUND.length) * AROUND.length, AROUND.length];
-  const mid = Math.min(first + size - 2, Math.max(first + 1, best));
-  const [x0, x1, x2] = [mid - 1, mid, mid + 1].map((i) => Math.log(hz[i]!)) as [
-    number,
-    number,
-    number,
-  ];
-  const [y0, y1, y2] = [flow[mid - 1]!, flow[mid]!, flow[mid + 1]!];
-  const [p, q] = [(y1 - y0) / (x1 - x0), (y2 - y1) / (x2 - x1)];
-  const bend = (q - p) / (x2 - x0);
-  let at = x1;
-  let value = flow[best]!;
-  if (bend < 0) {
-    at = Math.min(x2, Math.max(x0, (x0 + x1) / 2 - p / (2 * bend)));
-    value = Math.max(value, y0 + p * (at - x0) + bend * (at - x0) * (at - x1));
-  }
-  return { speed: value / model.boreArea_m2, at: Math.exp(at) };
 }
