@@ -17,12 +17,6 @@ export function Mark({ className = "" }: { className?: string }) {
       />
       <path d="M13.5 2.5h3.6v5h-3.6zM18.7 2.5h3.6v5h-3.6z" className="fill-ply-dark" />
       <path d="M13.5 16.5h3.6v5h-3.6zM18.7 16.5h3.6v5h-3.6z" className="fill-ply-dark" />
-      <path
-        d="M9 12h14"
-        className="stroke-scribe"
-        strokeWidth="1.4"
-        strokeDasharray="5 1.8 1.2 1.8"
-      />
     </svg>
   );
 }

@@ -5,6 +5,7 @@ import { useUnitPreferences } from "@/components/shell/unit-preferences";
 import { formatQuantity } from "@/lib/units/format";
 import { rangeWords } from "@/lib/units/range";
 import { shownUnits } from "@/lib/units/shown-units";
+import { Lettered } from "./lettered";
 import { useQuantity, type QuantityInput } from "./use-quantity";
 
 interface QuantityFieldProps extends QuantityInput {
@@ -29,7 +30,9 @@ export function QuantityField(props: QuantityFieldProps) {
   return (
     <div className="field-row" data-field={id} data-fault={field.fault !== null || undefined}>
       <div className="field-name">
-        <label htmlFor={id}>{label}</label>
+        <label htmlFor={id}>
+          <Lettered text={label} />
+        </label>
         {hint}
       </div>
       <span className="field-aside lettering">

@@ -2,6 +2,7 @@
 
 import type { ReactNode } from "react";
 import { Icon } from "./icons";
+import { Lettered } from "./lettered";
 
 interface SelectFieldProps<Value extends string> {
   id: string;
@@ -19,7 +20,9 @@ export function SelectField<Value extends string>(props: SelectFieldProps<Value>
   return (
     <div className="field-row" data-field={id}>
       <div className="field-name">
-        <label htmlFor={id}>{label}</label>
+        <label htmlFor={id}>
+          <Lettered text={label} />
+        </label>
         {hint}
       </div>
       <span className="field-aside" />

@@ -66,7 +66,7 @@ export const shownUnits: Record<QuantityKind, Record<UnitPreferences["system"], 
   inductance: both({ unit: "mH", per: 1e-3, places: finerBelow([10, 2], [100, 1]), trim: true }),
   time: both({ unit: "ms", per: 1e-3, places: finerBelow([10, 2], [100, 1]) }),
   level: both({ unit: "dB", per: 1, places: fixed(1) }),
-  ratio: both({ unit: "", per: 1, places: finerBelow([10, 2], [100, 1]) }),
+  ratio: both({ unit: "", per: 1, places: finerBelow([10, 2], [100, 1]), trim: true }),
   angle: both({ unit: "°", per: 1, places: fixed(1), trim: true, tight: true }),
   count: both({ unit: "", per: 1, places: fixed(0) }),
 };
