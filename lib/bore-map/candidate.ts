@@ -11,8 +11,8 @@ export interface FlareChoice {
 export type VentForm = "plain" | "ringed";
 
 /**
- * How a candidate stands to the box: the first fits. "too long" has its length solved as if no
- * wall stood behind it; of the others there are no figures.
+ * How a candidate stands to the box: the first fits. "too long" has its length solved as in a
+ * box deep enough to leave one bore's width behind it; of the others there are no figures.
  */
 export const candidateStates = [
   "fits",

@@ -94,7 +94,7 @@ const nothing = (state: number): Solved => ({
 /**
  * Solves the first tube's length so that the susceptances at the tuning cancel. The vent's reactance
  * is nearly proportional to its length, so it is put right in units of length; a wall close behind
- * is met by bisection.
+ * is met by bisection. What is too long is solved as in a box that leaves one bore's width behind it.
  *
  * @param guess_m - overall length to begin from [m]; 0 for none
  */
@@ -139,7 +139,7 @@ function solveLength(context: SolveContext, shape: CandidateShape, guess_m: numb
   /** How much longer the vent acts than it should [m], to first order. */
   const excess = (overall: number, free: boolean): number => {
     vent = candidateVent(base, shape, overall - rest);
-    if (free) vent = { ...vent, clearance_m: FAR_M };
+    if (free) vent = { ...vent, clearance_m: shape.diameter_m };
     model = modelVent(vent, design.enclosure, air, context.options, "design.vents[0]");
     return -area / (w * air.density * model.respond(at).innerIm[0]!) - wanted;
   };
@@ -160,7 +160,7 @@ function solveLength(context: SolveContext, shape: CandidateShape, guess_m: numb
   return free === null ? nothing(NOT_BUILDABLE) : figures(context, vent, model, room, TOO_LONG);
 }
 
-/** A wall this far away is not felt [m]. */
+/** Told where no wall is known behind the vent [m]. */
 const FAR_M = 20;
 
 /** Root of a rising function of slope near 1 in [low, high]; null where it is not enclosed. The last call made is at the root. */
