@@ -10,10 +10,10 @@ import { Dialog } from "@/components/ui/dialog";
 import { useBench, useBenchStore } from "./bench-context";
 import { useSettled } from "./use-settled";
 
-const BoreMap = dynamic(
-  () => import("@/components/charts/bore-map").then((part) => part.BoreMap),
-  { ssr: false, loading: () => <div className="bore-map-frame" aria-hidden="true" /> },
-);
+const BoreMap = dynamic(() => import("@/components/charts/bore-map").then((part) => part.BoreMap), {
+  ssr: false,
+  loading: () => <div className="bore-map-frame" aria-hidden="true" />,
+});
 
 /** Vent diameter against air speed, with what is too long for the box: small here, large on asking. */
 export function BoreMapPanel() {

@@ -68,11 +68,16 @@ const KEY = "ventwright.ring-habits";
 export function readRingHabits(): RingHabits {
   try {
     const kept: unknown = JSON.parse(window.localStorage.getItem(KEY) ?? "null");
-    if (typeof kept !== "object" || kept === null || !("sheets" in kept)) return usualHabits;
-    return { ...usualHabits, ...kept };
+    return isHabits(kept) ? { ...usualHabits, ...kept } : usualHabits;
   } catch {
     return usualHabits;
   }
+}
+
+function isHabits(value: unknown): value is Partial<RingHabits> & Pick<RingHabits, "sheets"> {
+  return (
+    typeof value === "object" && value !== null && "sheets" in value && Array.isArray(value.sheets)
+  );
 }
 
 export function keepRingHabits(habits: RingHabits): void {
