@@ -30,6 +30,7 @@ export function CurveStripsFrame({
   limits = NO_LIMITS,
   range_hz = DEFAULT_RANGE,
   message,
+  caution,
 }: {
   strips: readonly StripId[];
   preferences: UnitPreferences;
@@ -38,6 +39,8 @@ export function CurveStripsFrame({
   range_hz?: Domain;
   /** Said in place of the curves, such as what is missing for them. */
   message?: string;
+  /** The same caution as the strips will carry, so that its room is kept. */
+  caution?: string;
 }) {
   const x = logScale(range_hz, [0, WIDTH]);
   const domains = stripDomains(null, curves ? [curves] : [], limits, preferences, range_hz);
@@ -93,7 +96,8 @@ export function CurveStripsFrame({
           </span>
         ))}
       </div>
-      {message ? <p className={styles.foot}>{message}</p> : null}
+      <p className={styles.foot}>{message}</p>
+      {caution ? <p className={styles.caution}>{caution}</p> : null}
     </div>
   );
 }

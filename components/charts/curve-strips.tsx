@@ -1,14 +1,7 @@
 "use client";
 
 import type { ReactNode, Ref } from "react";
-import {
-  startTransition,
-  useId,
-  useImperativeHandle,
-  useLayoutEffect,
-  useRef,
-  useState,
-} from "react";
+import { startTransition, useImperativeHandle, useLayoutEffect, useRef, useState } from "react";
 import type { Curves } from "@/lib/acoustics/answer";
 import type { Domain } from "@/lib/charts/scale";
 import { stripDomains } from "@/lib/charts/strip-domains";
@@ -72,7 +65,6 @@ export function CurveStrips(props: CurveStripsProps) {
   const sheet = useStripSheet(input, standing, range_hz, width_px, live);
   const { plots, x, domains } = sheet;
   const tuning_hz = limits.tuning_hz ?? null;
-  const summary = useId();
 
   useLayoutEffect(() => {
     if (root.current && width_px > 0)
@@ -115,8 +107,8 @@ export function CurveStrips(props: CurveStripsProps) {
         props.fallback
       ) : (
         <>
-          <StripRows input={input} sheet={sheet} range_hz={range_hz} summaryId={summary}>
-            <StripHand x={x} describedBy={summary} current={() => position.current} onMove={move} />
+          <StripRows input={input} sheet={sheet} range_hz={range_hz}>
+            <StripHand x={x} current={() => position.current} onMove={move} />
           </StripRows>
           <StripFoot
             input={input}

@@ -48,6 +48,7 @@ export const StripChart = memo(function StripChart({
       >
         <CartesianGrid
           stroke="var(--color-rule)"
+          strokeOpacity={0.7}
           verticalValues={grid}
           horizontalValues={plot.ticks}
         />

@@ -22,12 +22,10 @@ const KEY_STEPS: Record<string, number> = {
 /** The cursor's handle over all plots: pointer, touch and keys. */
 export function StripHand({
   x,
-  describedBy,
   current,
   onMove,
 }: {
   x: Scale;
-  describedBy: string;
   current: () => number;
   onMove: (cursor_hz: number) => void;
 }) {
@@ -74,7 +72,6 @@ export function StripHand({
       role="slider"
       tabIndex={0}
       aria-label="Cursor frequency"
-      aria-describedby={describedBy}
       aria-valuemin={x.domain[0]}
       aria-valuemax={x.domain[1]}
       aria-valuenow={x.domain[0]}

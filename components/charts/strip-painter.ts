@@ -22,6 +22,9 @@ export interface PaintedSheet {
   plots: readonly StripPlot[];
 }
 
+/** Room that the figure at the tuning's line needs [px]. */
+const TUNING_LABEL = 62;
+
 interface StripNodes {
   plot: StripPlot;
   paths: Element[];
@@ -62,7 +65,6 @@ export class StripPainter {
     });
     root.toggleAttribute("data-live", this.liveCurves !== null);
     if (this.liveCurves) this.paintLive(this.liveCurves);
-    this.paintTuning();
     this.paintCursor();
   }
 
@@ -121,6 +123,8 @@ export class StripPainter {
     line.hidden = !inside;
     if (!inside) return;
     line.style.transform = `translateX(${toPixel(tuning_hz).toFixed(2)}px)`;
+    const toCursor = this.sheet.x.toPixel(this.cursor_hz) - toPixel(tuning_hz);
+    line.toggleAttribute("data-left", toCursor > 1 && toCursor < TUNING_LABEL);
     const figure = line.querySelector("[data-tuning-figure]");
     if (figure) figure.textContent = hertz(tuning_hz);
   }
@@ -137,6 +141,7 @@ export class StripPainter {
       const shift = Math.min(Math.max(at, half), this.sheet.x.range[1] - half);
       flag.style.transform = `translateX(${shift.toFixed(2)}px) translateX(-50%)`;
     }
+    this.paintTuning();
     this.paintReadings();
   }
 

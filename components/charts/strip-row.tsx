@@ -21,8 +21,8 @@ export function StripRow({
   return (
     <li className={styles.strip} data-strip={definition.id}>
       <div className={styles.name}>
-        <h3>{definition.name}</h3>
-        <p>{unitLine(definition, preferences)}</p>
+        <p className={styles.title}>{definition.name}</p>
+        <p className={styles.unitLine}>{unitLine(definition, preferences)}</p>
       </div>
       <div className={styles.plot} aria-hidden="true">
         {children}

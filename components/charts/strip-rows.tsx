@@ -17,13 +17,11 @@ export function StripRows({
   input,
   sheet,
   range_hz,
-  summaryId,
   children,
 }: {
   input: SheetInput;
   sheet: StripSheet;
   range_hz: Domain;
-  summaryId: string;
   /** The cursor's handle. */
   children: ReactNode;
 }) {
@@ -46,7 +44,6 @@ export function StripRows({
         width={sheet.width}
         layout={sheet.layout}
         range_hz={range_hz}
-        summaryId={summaryId}
       />
       <div className={styles.axis} aria-hidden="true" />
       <div className={styles.marks} aria-hidden="true">
@@ -61,7 +58,7 @@ export function StripRows({
 }
 
 type ListProps = Pick<SheetInput, "curves" | "limits" | "preferences" | "ventNames"> &
-  Pick<StripSheet, "plots" | "width" | "layout"> & { range_hz: Domain; summaryId: string };
+  Pick<StripSheet, "plots" | "width" | "layout"> & { range_hz: Domain };
 
 /** Rendered again only when something settled has changed, never for the cursor. */
 const StripList = memo(function StripList({
@@ -73,7 +70,6 @@ const StripList = memo(function StripList({
   width,
   layout,
   range_hz,
-  summaryId,
 }: ListProps) {
   const summaries = useMemo(
     () =>
@@ -83,7 +79,7 @@ const StripList = memo(function StripList({
     [plots, curves, limits, preferences, ventNames],
   );
   return (
-    <ul className={styles.list} id={summaryId}>
+    <ul className={styles.list}>
       {plots.map((plot, n) => (
         <StripRow
           key={plot.id}

@@ -43,7 +43,8 @@ export function placeLabels(
   const placed: PlacedLabel[] = [];
   for (const curve of curves) {
     const half = (curve.text.length * box.letter) / 2;
-    const others = [...obstacles, ...curves.filter((c) => c !== curve).map((c) => c.y)];
+    const labelled = curves.filter((other) => other !== curve).map((other) => other.y);
+    const others = [...obstacles, ...labelled];
     let best: (PlacedLabel & { score: number }) | null = null;
     for (let i = 0; i < x.length; i++) {
       const at = x[i] ?? 0;
@@ -60,8 +61,10 @@ export function placeLabels(
             apart(label, at, middle, half + (label.text.length * box.letter) / 2, box.line),
           ),
         );
+        // A label must also say which curve it means: where curves run together, it cannot.
+        const alone = Math.min(...labelled.map((y) => Math.abs((y[i] ?? Infinity) - on)));
         // Beyond two lines of room, more is no better: then the place further right wins.
-        const score = Math.min(clear, 2 * box.line) + at / 2000;
+        const score = Math.min(clear, 2 * box.line) + Math.min(alone, 2 * box.line) + at / 2000;
         if (!best || score > best.score) best = { text: curve.text, x: at, y: middle + 4, score };
       }
     }

@@ -157,7 +157,7 @@ const definitions: Record<StripId, StripDefinition> = {
   level: {
     id: "level",
     name: "Clean level",
-    suffix: "largest, at 1 m",
+    suffix: "at 1 m",
     unit: shownAs("level", 1),
     series: (curves) => one(curves.max_spl_db),
     limit: noLimit,

@@ -1,0 +1,130 @@
+"use client";
+
+import { useMemo, useRef, useState } from "react";
+import type { BoreMapPick, BoreMapPoint, BoreMapSeries, Probe } from "@/lib/charts/bore-map";
+import {
+  BORE_QUANTITIES,
+  boreMapSummary,
+  describePick,
+  pickAt,
+  probeNear,
+} from "@/lib/charts/bore-map";
+import { airSpeedCap, boreDomain, borePlot, boreUnit } from "@/lib/charts/bore-plot";
+import { TICK_WIDTH } from "@/lib/charts/layout";
+import { linearScale } from "@/lib/charts/scale";
+import type { StockBore } from "@/lib/charts/stock-bores";
+import { STOCK_BORES } from "@/lib/charts/stock-bores";
+import type { UnitPreferences } from "@/lib/units/preferences";
+import { BoreHand } from "./bore-hand";
+import { BoreMarks } from "./bore-marks";
+import { BoreStrip } from "./bore-strip";
+import { BoreTable } from "./bore-table";
+import { useSame } from "./use-same";
+import { useWidth } from "./use-width";
+import styles from "./bore-map.module.css";
+
+export interface BoreMapProps<P extends BoreMapPoint = BoreMapPoint> {
+  series: BoreMapSeries<P>;
+  /** The vent as it stands; null where it is none of these. */
+  chosen: { count: number; bore_m: number; air_speed_m_s: number | null } | null;
+  airSpeedLimit_m_s: number | null;
+  /** Diameters that are sold; generic ones where nothing is given. */
+  stock?: readonly StockBore[];
+  preferences: UnitPreferences;
+  /** Small: one strip for a margin. Large: length and pipe resonance below it, and the table. */
+  size: "small" | "large";
+  onPick?: (pick: BoreMapPick<P>) => void;
+}
+
+/** Vent diameter against peak air speed for one, two, three, four vents, with what fits. */
+export function BoreMap<P extends BoreMapPoint>(props: BoreMapProps<P>) {
+  const { series, airSpeedLimit_m_s: limit, size, onPick, stock = STOCK_BORES } = props;
+  const preferences = useSame(props.preferences);
+  const chosen = useSame(props.chosen);
+  const root = useRef<HTMLDivElement>(null);
+  const width_px = useWidth(root);
+  const [probe, setProbe] = useState<Probe | null>(null);
+  const width = Math.max(1, width_px - TICK_WIDTH - 8);
+  const boreFactor = boreUnit("length", preferences).factor;
+  const driven = series.some(({ points }) => points.some((point) => point.air_speed_m_s !== null));
+  const x = useMemo(() => {
+    const cap = driven ? airSpeedCap(limit, chosen?.air_speed_m_s ?? null) : null;
+    return linearScale(boreDomain(series, boreFactor, cap), [0, width]);
+  }, [series, boreFactor, driven, limit, chosen, width]);
+  const plots = useMemo(() => {
+    const shown = BORE_QUANTITIES.filter((quantity) => driven || quantity !== "air-speed");
+    return (size === "small" ? shown.slice(0, 1) : shown).map((quantity, n) => {
+      const air = quantity === "air-speed";
+      const input = {
+        series,
+        preferences,
+        limit: air ? limit : null,
+        chosen: air ? (chosen?.air_speed_m_s ?? null) : null,
+      };
+      const tall = size === "large" ? (n === 0 ? 280 : 110) : 150;
+      return borePlot(quantity, input, null, x, { top: 8, bottom: 8 + tall }, boreFactor);
+    });
+  }, [size, driven, series, preferences, limit, chosen, x, boreFactor]);
+  const standing = chosen ? probeNear(series, chosen.count, chosen.bore_m) : null;
+  const start = standing ?? { series: 0, point: 0 };
+  const pick = pickAt(series, probe ?? standing);
+  const choose = (at: Probe) => {
+    const picked = pickAt(series, at);
+    if (picked) onPick?.(picked);
+  };
+  return (
+    <div className={styles.map}>
+      <p className="sr-only">{boreMapSummary(series, limit, preferences)}</p>
+      <div ref={root} className={size === "large" ? styles.large : styles.small}>
+        {width_px > 0
+          ? plots.map((plot, n) => (
+              <div key={plot.quantity} className={styles.strip}>
+                <BoreStrip
+                  plot={plot}
+                  series={series}
+                  x={x}
+                  limit={n === 0 && driven ? limit : null}
+                  withAxis={n === plots.length - 1}
+                  titled={size === "large" || !driven}
+                />
+                <BoreMarks
+                  plot={plot}
+                  series={series}
+                  x={x}
+                  boreFactor={boreFactor}
+                  chosen={chosen}
+                  probe={probe}
+                  stock={stock}
+                  limit={n === 0 && driven ? limit : null}
+                  everywhere={size === "large"}
+                  preferences={preferences}
+                />
+                {n === 0 ? (
+                  <BoreHand
+                    plot={plot}
+                    series={series}
+                    x={x}
+                    boreFactor={boreFactor}
+                    probe={probe ?? start}
+                    onProbe={setProbe}
+                    onPick={onPick ? choose : undefined}
+                    valueText={pick ? describePick(pick, preferences) : ""}
+                  />
+                ) : null}
+              </div>
+            ))
+          : null}
+      </div>
+      <p className={styles.reading}>{pick ? describePick(pick, preferences) : "\u00a0"}</p>
+      {size === "large" ? (
+        <BoreTable
+          series={series}
+          stock={stock}
+          chosen={chosen}
+          preferences={preferences}
+          onPick={onPick}
+        />
+      ) : null}
+    </div>
+  );
+}

@@ -1,0 +1,113 @@
+"use client";
+
+import { useState } from "react";
+import type { BoreMapPick, BoreMapPoint, BoreMapSeries } from "@/lib/charts/bore-map";
+import { pickAt, probeNear } from "@/lib/charts/bore-map";
+import type { StockBore } from "@/lib/charts/stock-bores";
+import { formatQuantity, NO_FIGURE } from "@/lib/units/format";
+import type { QuantityKind, UnitPreferences } from "@/lib/units/preferences";
+import { shownUnits } from "@/lib/units/shown-units";
+import styles from "./table-twin.module.css";
+
+/** The table twin of the bore map: every count at the stock bores, each row can be chosen. */
+export function BoreTable<P extends BoreMapPoint>({
+  series,
+  stock,
+  chosen,
+  preferences,
+  onPick,
+}: {
+  series: BoreMapSeries<P>;
+  stock: readonly StockBore[];
+  chosen: { count: number; bore_m: number } | null;
+  preferences: UnitPreferences;
+  onPick?: (pick: BoreMapPick<P>) => void;
+}) {
+  const [open, setOpen] = useState(false);
+  const rows = open ? rowsOf(series, stock, chosen) : [];
+  const units = (kind: QuantityKind) => shownUnits[kind][preferences.system].unit;
+  const value = (si: number | null, kind: QuantityKind) =>
+    si === null ? NO_FIGURE : formatQuantity(si, kind, preferences).value;
+  const heads: [string, string][] = [
+    ["Vents", ""],
+    ["Bore", units("length")],
+    ["Air speed", units("speed")],
+    ["Length", units("length")],
+    ["Clearance", units("length")],
+    ["Pipe resonance", "Hz"],
+    ["Box", ""],
+  ];
+  return (
+    <details className={styles.twin} onToggle={(event) => setOpen(event.currentTarget.open)}>
+      <summary>Figures</summary>
+      {open ? (
+        <div
+          className={styles.scroll}
+          tabIndex={0}
+          role="region"
+          aria-label="Figures of the bore map"
+        >
+          <table>
+            <caption className="sr-only">Vents at stock bores</caption>
+            <thead>
+              <tr>
+                {heads.map(([name, unit]) => (
+                  <th key={name} scope="col">
+                    {name} <span>{unit}</span>
+                  </th>
+                ))}
+                {onPick ? <td /> : null}
+              </tr>
+            </thead>
+            <tbody>
+              {rows.map(({ pick, standing }) => (
+                <tr key={`${pick.count}-${pick.bore_m}`} data-chosen={standing ? "" : undefined}>
+                  <th scope="row">{pick.count}</th>
+                  <td>{value(pick.bore_m, "length")}</td>
+                  <td>{value(pick.air_speed_m_s, "speed")}</td>
+                  <td>{value(pick.length_m, "length")}</td>
+                  <td>{value(pick.clearance_m, "length")}</td>
+                  <td>{value(pick.pipe_hz, "frequency")}</td>
+                  <td>{pick.fits ? "fits" : "too long"}</td>
+                  {onPick ? (
+                    <td>
+                      <button type="button" className="link" onClick={() => onPick(pick)}>
+                        Use
+                        <span className="sr-only">
+                          {` ${pick.count} × ${value(pick.bore_m, "length")}`}
+                        </span>
+                      </button>
+                    </td>
+                  ) : null}
+                </tr>
+              ))}
+            </tbody>
+          </table>
+        </div>
+      ) : null}
+    </details>
+  );
+}
+
+function rowsOf<P extends BoreMapPoint>(
+  series: BoreMapSeries<P>,
+  stock: readonly StockBore[],
+  chosen: { count: number; bore_m: number } | null,
+) {
+  return series.flatMap(({ count, points }) => {
+    const first = points[0]?.bore_m ?? Infinity;
+    const last = points.at(-1)?.bore_m ?? 0;
+    const own = chosen?.count === count ? [chosen.bore_m] : [];
+    const bores = [...stock.map((one) => one.bore_m), ...own]
+      .filter((bore) => bore >= first && bore <= last)
+      .sort((a, b) => a - b);
+    const seen = new Set<number>();
+    return bores.flatMap((bore) => {
+      const probe = probeNear(series, count, bore);
+      const pick = pickAt(series, probe);
+      if (!pick || seen.has(pick.bore_m)) return [];
+      seen.add(pick.bore_m);
+      return [{ pick, standing: own.includes(bore) }];
+    });
+  });
+}
