@@ -1,5 +1,5 @@
 import type { Metadata, Viewport } from "next";
-import { cookies } from "next/headers";
+import { cookies, headers } from "next/headers";
 import type { ReactNode } from "react";
 import { archivo, archivoExtended } from "@/components/shell/fonts";
 import { Footer } from "@/components/shell/footer";
@@ -28,6 +28,7 @@ export const viewport: Viewport = {
 export default async function RootLayout({ children }: { children: ReactNode }) {
   const session = await currentSession();
   const cookie = (await cookies()).get(PREFERENCES_COOKIE)?.value;
+  const requestId = (await headers()).get("x-request-id");
   const preferences = session?.person.preferences ?? readSessionPreferences(cookie);
   return (
     <html
@@ -35,6 +36,7 @@ export default async function RootLayout({ children }: { children: ReactNode }) 
       className={`${archivo.variable} ${archivoExtended.variable}`}
       data-theme={preferences.theme === "system" ? undefined : preferences.theme}
     >
+      <head>{requestId && <meta name="request-id" content={requestId} />}</head>
       <body className="flex min-h-dvh flex-col">
         <a href="#main" className="skip-link">
           Skip to the content

@@ -69,7 +69,10 @@ interface FigureProps {
 /** A figure; its unit stands in the header, and beside it where the header is folded away. */
 function Figure({ label, value, kind }: FigureProps) {
   const [preferences] = useUnitPreferences();
-  const shown = value === null ? null : formatQuantity(value, kind, preferences);
+  /** One number of places down the column, so that the points stand under each other. */
+  const digits =
+    kind === "count" ? 0 : kind === "volume" && preferences.system !== "metric" ? 2 : 1;
+  const shown = value === null ? null : formatQuantity(value, kind, preferences, { digits });
   return (
     <td role="cell" className="design-figure" data-label={label}>
       {shown ? shown.value : <span aria-label="not known">{NO_FIGURE}</span>}
