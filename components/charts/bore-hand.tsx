@@ -2,7 +2,7 @@
 
 import { useRef } from "react";
 import type { KeyboardEvent, PointerEvent } from "react";
-import type { BoreMapSeries, Probe } from "@/lib/charts/bore-map";
+import type { MapLines, Probe } from "@/lib/charts/bore-map";
 import { probeAtPixel, stepAlong, stepCount } from "@/lib/charts/bore-map";
 import type { BorePlot } from "@/lib/charts/bore-plot";
 import type { Scale } from "@/lib/charts/scale";
@@ -23,7 +23,7 @@ export function BoreHand({
   valueText,
 }: {
   plot: BorePlot;
-  series: BoreMapSeries;
+  series: MapLines;
   x: Scale;
   boreFactor: number;
   probe: Probe;
@@ -34,7 +34,7 @@ export function BoreHand({
   const pressed = useRef<{ x: number; y: number } | null>(null);
   const probeUnder = (event: PointerEvent<HTMLDivElement>) => {
     const { left, top } = event.currentTarget.getBoundingClientRect();
-    const toX = (bore_m: number) => x.toPixel(bore_m * boreFactor);
+    const toX = (diameter_m: number) => x.toPixel(diameter_m * boreFactor);
     const toY = (value: number) => plot.map.offset + plot.map.gain * value;
     const at = { x: event.clientX - left, y: event.clientY - top };
     return probeAtPixel(series, plot.quantity, toX, toY, at.x, at.y);
@@ -57,7 +57,8 @@ export function BoreHand({
     event.preventDefault();
   };
   const bores = series[probe.series]?.points ?? [];
-  const shown = (bore_m: number | undefined) => Number(((bore_m ?? 0) * boreFactor).toFixed(1));
+  const shown = (diameter_m: number | undefined) =>
+    Number(((diameter_m ?? 0) * boreFactor).toFixed(1));
   return (
     <div
       className={styles.hand}
@@ -66,9 +67,9 @@ export function BoreHand({
       tabIndex={0}
       aria-label="Vent diameter and number of vents"
       aria-orientation="horizontal"
-      aria-valuemin={shown(bores[0]?.bore_m)}
-      aria-valuemax={shown(bores.at(-1)?.bore_m)}
-      aria-valuenow={shown(bores[probe.point]?.bore_m)}
+      aria-valuemin={shown(bores[0]?.diameter_m)}
+      aria-valuemax={shown(bores.at(-1)?.diameter_m)}
+      aria-valuenow={shown(bores[probe.point]?.diameter_m)}
       aria-valuetext={valueText}
       onPointerDown={(event) => {
         if (event.button === 0) pressed.current = { x: event.clientX, y: event.clientY };
@@ -83,7 +84,7 @@ export function BoreHand({
   );
 }
 
-function moved(series: BoreMapSeries, probe: Probe, key: string, steps: number): Probe | null {
+function moved(series: MapLines, probe: Probe, key: string, steps: number): Probe | null {
   switch (key) {
     case "ArrowLeft":
       return stepAlong(series, probe, -steps);

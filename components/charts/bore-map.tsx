@@ -1,12 +1,16 @@
 "use client";
 
 import { useMemo, useRef, useState } from "react";
-import type { BoreMapPick, BoreMapPoint, BoreMapSeries, Probe } from "@/lib/charts/bore-map";
+import type { Design } from "@/lib/document/schema";
+import { equalDiameter } from "@/lib/bore-map/candidate";
+import type { BoreMapPoint, BoreMapSeries } from "@/lib/bore-map/series";
+import type { Probe } from "@/lib/charts/bore-map";
 import {
   BORE_QUANTITIES,
   boreMapSummary,
   describePick,
   pickAt,
+  pointBetween,
   probeNear,
 } from "@/lib/charts/bore-map";
 import { airSpeedCap, boreDomain, borePlot, boreUnit } from "@/lib/charts/bore-plot";
@@ -23,32 +27,36 @@ import { useSame } from "./use-same";
 import { useWidth } from "./use-width";
 import styles from "./bore-map.module.css";
 
-export interface BoreMapProps<P extends BoreMapPoint = BoreMapPoint> {
-  series: BoreMapSeries<P>;
-  /** The vent as it stands; null where it is none of these. */
-  chosen: { count: number; bore_m: number; air_speed_m_s: number | null } | null;
-  airSpeedLimit_m_s: number | null;
+export interface BoreMapProps {
+  series: BoreMapSeries;
+  /** The design and the vent whose place on the map is marked. */
+  design: Design;
+  ventIndex: number;
+  /** Its peak air speed as computed for the design itself. */
+  airSpeed_m_s: number | null;
   /** Diameters that are sold; generic ones where nothing is given. */
   stock?: readonly StockBore[];
   preferences: UnitPreferences;
   /** Small: one strip for a margin. Large: length and pipe resonance below it, and the table. */
   size: "small" | "large";
-  onPick?: (pick: BoreMapPick<P>) => void;
+  onPick?: (point: BoreMapPoint) => void;
 }
 
 /** Vent diameter against peak air speed for one, two, three, four vents, with what fits. */
-export function BoreMap<P extends BoreMapPoint>(props: BoreMapProps<P>) {
-  const { series, airSpeedLimit_m_s: limit, size, onPick, stock = STOCK_BORES } = props;
+export function BoreMap(props: BoreMapProps) {
+  const { size, onPick, stock = STOCK_BORES } = props;
+  const series = props.series.lines;
+  const limit = props.series.air_speed_limit_m_s;
+  const driven = props.series.hasDriver;
   const preferences = useSame(props.preferences);
-  const chosen = useSame(props.chosen);
+  const chosen = useSame(chosenOf(props.design, props.ventIndex, props.airSpeed_m_s));
   const root = useRef<HTMLDivElement>(null);
   const width_px = useWidth(root);
   const [probe, setProbe] = useState<Probe | null>(null);
   const width = Math.max(1, width_px - TICK_WIDTH - 8);
   const boreFactor = boreUnit("length", preferences).factor;
-  const driven = series.some(({ points }) => points.some((point) => point.air_speed_m_s !== null));
   const x = useMemo(() => {
-    const cap = driven ? airSpeedCap(limit, chosen?.air_speed_m_s ?? null) : null;
+    const cap = driven ? airSpeedCap(limit, chosen?.peak_air_speed_m_s ?? null) : null;
     return linearScale(boreDomain(series, boreFactor, cap), [0, width]);
   }, [series, boreFactor, driven, limit, chosen, width]);
   const plots = useMemo(() => {
@@ -59,15 +67,17 @@ export function BoreMap<P extends BoreMapPoint>(props: BoreMapProps<P>) {
         series,
         preferences,
         limit: air ? limit : null,
-        chosen: air ? (chosen?.air_speed_m_s ?? null) : null,
+        chosen: air ? (chosen?.peak_air_speed_m_s ?? null) : null,
       };
       const tall = size === "large" ? (n === 0 ? 280 : 110) : 150;
       return borePlot(quantity, input, null, x, { top: 8, bottom: 8 + tall }, boreFactor);
     });
   }, [size, driven, series, preferences, limit, chosen, x, boreFactor]);
-  const standing = chosen ? probeNear(series, chosen.count, chosen.bore_m) : null;
+  const standing = chosen ? probeNear(series, chosen.count, chosen.diameter_m) : null;
   const start = standing ?? { series: 0, point: 0 };
-  const pick = pickAt(series, probe ?? standing);
+  const pick = probe
+    ? pickAt(series, probe)
+    : chosen && pointBetween(series, chosen.count, chosen.diameter_m);
   const choose = (at: Probe) => {
     const picked = pickAt(series, at);
     if (picked) onPick?.(picked);
@@ -94,7 +104,7 @@ export function BoreMap<P extends BoreMapPoint>(props: BoreMapProps<P>) {
                   boreFactor={boreFactor}
                   chosen={chosen}
                   probe={probe}
-                  stock={stock}
+                  stock={n === 0 ? stock : NO_STOCK}
                   limit={n === 0 && driven ? limit : null}
                   everywhere={size === "large"}
                   preferences={preferences}
@@ -127,4 +137,17 @@ export function BoreMap<P extends BoreMapPoint>(props: BoreMapProps<P>) {
       ) : null}
     </div>
   );
+}
+
+const NO_STOCK: readonly StockBore[] = [];
+
+/** The vent as it stands on the map; null for bare elements, which have no bore. */
+function chosenOf(design: Design, ventIndex: number, airSpeed_m_s: number | null) {
+  const vent = design.vents[ventIndex];
+  if (!vent || "lumped" in vent) return null;
+  return {
+    count: vent.count,
+    diameter_m: equalDiameter(vent.bore),
+    peak_air_speed_m_s: airSpeed_m_s,
+  };
 }

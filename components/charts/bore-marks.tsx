@@ -1,4 +1,4 @@
-import type { BoreMapSeries, Probe } from "@/lib/charts/bore-map";
+import type { MapLines, Probe } from "@/lib/charts/bore-map";
 import { boreValue } from "@/lib/charts/bore-map";
 import type { BorePlot } from "@/lib/charts/bore-plot";
 import { valueAt } from "@/lib/charts/cursor";
@@ -23,10 +23,10 @@ export function BoreMarks({
   preferences,
 }: {
   plot: BorePlot;
-  series: BoreMapSeries;
+  series: MapLines;
   x: Scale;
   boreFactor: number;
-  chosen: { count: number; bore_m: number; air_speed_m_s: number | null } | null;
+  chosen: { count: number; diameter_m: number; peak_air_speed_m_s: number | null } | null;
   probe: Probe | null;
   stock: readonly StockBore[];
   limit: number | null;
@@ -34,22 +34,22 @@ export function BoreMarks({
   everywhere: boolean;
   preferences: UnitPreferences;
 }) {
-  const place = (count: number, bore_m: number, given: number | null = null) => {
+  const place = (count: number, diameter_m: number, given: number | null = null) => {
     const points = series.find((curve) => curve.count === count)?.points ?? [];
-    const bores = points.map((point) => point.bore_m);
+    const bores = points.map((point) => point.diameter_m);
     const values = points.map((point) => boreValue(point, plot.quantity));
-    const value = given ?? valueAt(bores, values, bore_m);
-    const at = { x: x.toPixel(bore_m * boreFactor), y: NaN };
+    const value = given ?? valueAt(bores, values, diameter_m);
+    const at = { x: x.toPixel(diameter_m * boreFactor), y: NaN };
     if (value !== null) at.y = plot.map.offset + plot.map.gain * value;
     const inside =
       at.x >= -0.5 && at.x <= x.range[1] + 0.5 && at.y >= plot.map.top && at.y <= plot.map.bottom;
     return inside ? at : null;
   };
-  const speed = plot.quantity === "air-speed" ? (chosen?.air_speed_m_s ?? null) : null;
-  const here = chosen ? place(chosen.count, chosen.bore_m, speed) : null;
+  const speed = plot.quantity === "air-speed" ? (chosen?.peak_air_speed_m_s ?? null) : null;
+  const here = chosen ? place(chosen.count, chosen.diameter_m, speed) : null;
   const probed = probe ? series[probe.series] : undefined;
   const probedPoint = probe ? probed?.points[probe.point] : undefined;
-  const probeAt = probed && probedPoint ? place(probed.count, probedPoint.bore_m) : null;
+  const probeAt = probed && probedPoint ? place(probed.count, probedPoint.diameter_m) : null;
   const limitY = limit === null ? null : plot.map.offset + plot.map.gain * limit;
   const toLeft = here !== null && here.x > x.range[1] - 78;
   return (
@@ -72,11 +72,11 @@ export function BoreMarks({
       {series
         .filter(({ count }) => everywhere || count === chosen?.count)
         .flatMap(({ count }) =>
-          stock.flatMap(({ bore_m }) => {
-            const at = place(count, bore_m);
+          stock.flatMap(({ diameter_m }) => {
+            const at = place(count, diameter_m);
             return at ? (
               <circle
-                key={`${count}-${bore_m}`}
+                key={`${count}-${diameter_m}`}
                 cx={at.x}
                 cy={at.y}
                 r={3}
@@ -98,7 +98,7 @@ export function BoreMarks({
             textAnchor={toLeft ? "end" : "start"}
             className={styles.chosenName}
           >
-            {chosen.count} × Ø {formatQuantity(chosen.bore_m, "length", preferences).value}
+            {chosen.count} × Ø {formatQuantity(chosen.diameter_m, "length", preferences).value}
           </text>
         </>
       ) : null}

@@ -2,7 +2,7 @@
 
 import { memo } from "react";
 import { CartesianGrid, Line, LineChart, ReferenceLine, XAxis, YAxis } from "recharts";
-import type { BoreMapSeries } from "@/lib/charts/bore-map";
+import type { MapLines } from "@/lib/charts/bore-map";
 import type { BorePlot } from "@/lib/charts/bore-plot";
 import { AXIS_HEIGHT, TICK_WIDTH } from "@/lib/charts/layout";
 import { countMark, LIMIT } from "@/lib/charts/marks";
@@ -23,7 +23,7 @@ export const BoreStrip = memo(function BoreStrip({
   titled,
 }: {
   plot: BorePlot;
-  series: BoreMapSeries;
+  series: MapLines;
   x: Scale;
   /** SI. */
   limit: number | null;

@@ -1,7 +1,7 @@
 "use client";
 
 import { useState } from "react";
-import type { BoreMapPick, BoreMapPoint, BoreMapSeries } from "@/lib/charts/bore-map";
+import type { MapLines, MapPoint } from "@/lib/charts/bore-map";
 import { pickAt, probeNear } from "@/lib/charts/bore-map";
 import type { StockBore } from "@/lib/charts/stock-bores";
 import { formatQuantity, NO_FIGURE } from "@/lib/units/format";
@@ -10,18 +10,18 @@ import { shownUnits } from "@/lib/units/shown-units";
 import styles from "./table-twin.module.css";
 
 /** The table twin of the bore map: every count at the stock bores, each row can be chosen. */
-export function BoreTable<P extends BoreMapPoint>({
+export function BoreTable<P extends MapPoint>({
   series,
   stock,
   chosen,
   preferences,
   onPick,
 }: {
-  series: BoreMapSeries<P>;
+  series: MapLines<P>;
   stock: readonly StockBore[];
-  chosen: { count: number; bore_m: number } | null;
+  chosen: { count: number; diameter_m: number } | null;
   preferences: UnitPreferences;
-  onPick?: (pick: BoreMapPick<P>) => void;
+  onPick?: (pick: P) => void;
 }) {
   const [open, setOpen] = useState(false);
   const rows = open ? rowsOf(series, stock, chosen) : [];
@@ -61,20 +61,23 @@ export function BoreTable<P extends BoreMapPoint>({
             </thead>
             <tbody>
               {rows.map(({ pick, standing }) => (
-                <tr key={`${pick.count}-${pick.bore_m}`} data-chosen={standing ? "" : undefined}>
+                <tr
+                  key={`${pick.count}-${pick.diameter_m}`}
+                  data-chosen={standing ? "" : undefined}
+                >
                   <th scope="row">{pick.count}</th>
-                  <td>{value(pick.bore_m, "length")}</td>
-                  <td>{value(pick.air_speed_m_s, "speed")}</td>
-                  <td>{value(pick.length_m, "length")}</td>
+                  <td>{value(pick.diameter_m, "length")}</td>
+                  <td>{value(pick.peak_air_speed_m_s, "speed")}</td>
+                  <td>{value(pick.overall_length_m, "length")}</td>
                   <td>{value(pick.clearance_m, "length")}</td>
-                  <td>{value(pick.pipe_hz, "frequency")}</td>
+                  <td>{value(pick.pipe_resonance_hz, "frequency")}</td>
                   <td>{pick.fits ? "fits" : "too long"}</td>
                   {onPick ? (
                     <td>
                       <button type="button" className="link" onClick={() => onPick(pick)}>
                         Use
                         <span className="sr-only">
-                          {` ${pick.count} × ${value(pick.bore_m, "length")}`}
+                          {` ${pick.count} × ${value(pick.diameter_m, "length")}`}
                         </span>
                       </button>
                     </td>
@@ -89,24 +92,24 @@ export function BoreTable<P extends BoreMapPoint>({
   );
 }
 
-function rowsOf<P extends BoreMapPoint>(
-  series: BoreMapSeries<P>,
+function rowsOf<P extends MapPoint>(
+  series: MapLines<P>,
   stock: readonly StockBore[],
-  chosen: { count: number; bore_m: number } | null,
+  chosen: { count: number; diameter_m: number } | null,
 ) {
   return series.flatMap(({ count, points }) => {
-    const first = points[0]?.bore_m ?? Infinity;
-    const last = points.at(-1)?.bore_m ?? 0;
-    const own = chosen?.count === count ? [chosen.bore_m] : [];
-    const bores = [...stock.map((one) => one.bore_m), ...own]
+    const first = points[0]?.diameter_m ?? Infinity;
+    const last = points.at(-1)?.diameter_m ?? 0;
+    const own = chosen?.count === count ? [chosen.diameter_m] : [];
+    const bores = [...stock.map((one) => one.diameter_m), ...own]
       .filter((bore) => bore >= first && bore <= last)
       .sort((a, b) => a - b);
     const seen = new Set<number>();
     return bores.flatMap((bore) => {
       const probe = probeNear(series, count, bore);
       const pick = pickAt(series, probe);
-      if (!pick || seen.has(pick.bore_m)) return [];
-      seen.add(pick.bore_m);
+      if (!pick || seen.has(pick.diameter_m)) return [];
+      seen.add(pick.diameter_m);
       return [{ pick, standing: own.includes(bore) }];
     });
   });

@@ -53,7 +53,7 @@ export function CurveStripsFrame({
           const definition = stripDefinition(id);
           const y = linearScale(domains[id], [HEIGHT, 0]);
           const map = pixelMap(y, definition.unit(preferences).factor);
-          const ticks = curves ? linearTicks(domains[id], 4) : [];
+          const ticks = curves ? (definition.ticks ?? linearTicks(domains[id], 4)) : [];
           return (
             <StripRow key={id} definition={definition} preferences={preferences}>
               <div className={styles.ticks}>

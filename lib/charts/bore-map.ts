@@ -3,32 +3,29 @@
  * the vent's diameter, each point already solved for the tuning. What can be asked of it without
  * drawing: the nearest point, the next one, a sentence about it.
  */
+import type { BoreMapPoint } from "@/lib/bore-map/series";
 import { formatQuantity } from "@/lib/units/format";
 import type { UnitPreferences } from "@/lib/units/preferences";
 
-export interface BoreMapPoint {
-  /** Diameter, or that of the circle of equal area. */
-  bore_m: number;
-  /** Peak, at the set drive; null without a driver. */
-  air_speed_m_s: number | null;
-  /** Overall, solved for the tuning. */
-  length_m: number;
-  /** Inner mouth to the wall it faces. */
-  clearance_m: number;
-  /** First pipe resonance; null where it is not known. */
-  pipe_hz: number | null;
-  fits: boolean;
+/** What the map needs to know of a candidate; SI. */
+export type MapPoint = Pick<
+  BoreMapPoint,
+  | "count"
+  | "diameter_m"
+  | "peak_air_speed_m_s"
+  | "overall_length_m"
+  | "clearance_m"
+  | "pipe_resonance_hz"
+  | "fits"
+>;
+
+/** One curve: a number of vents alike, its points by growing diameter. */
+export interface MapLine<P extends MapPoint = MapPoint> {
+  count: number;
+  points: readonly P[];
 }
 
-export type BoreMapSeries<P extends BoreMapPoint = BoreMapPoint> = readonly {
-  /** Number of vents alike. */
-  count: number;
-  /** Ascending bore. */
-  points: readonly P[];
-}[];
-
-/** A point somebody chose: a candidate and the number of vents it is for. */
-export type BoreMapPick<P extends BoreMapPoint = BoreMapPoint> = P & { count: number };
+export type MapLines<P extends MapPoint = MapPoint> = readonly MapLine<P>[];
 
 /** Where the person's probe stands: a curve and a point of it. */
 export interface Probe {
@@ -40,9 +37,10 @@ export const BORE_QUANTITIES = ["air-speed", "length", "pipe"] as const;
 export type BoreQuantity = (typeof BORE_QUANTITIES)[number];
 
 /** SI. */
-export function boreValue(point: BoreMapPoint, quantity: BoreQuantity): number | null {
-  if (quantity === "air-speed") return point.air_speed_m_s;
-  return quantity === "length" ? point.length_m : point.pipe_hz;
+export function boreValue(point: MapPoint, quantity: BoreQuantity): number | null {
+  if (quantity === "air-speed") return point.peak_air_speed_m_s;
+  if (quantity === "length") return point.overall_length_m;
+  return point.pipe_resonance_hz > 0 ? point.pipe_resonance_hz : null;
 }
 
 const COUNT_WORDS = ["no", "one", "two", "three", "four", "five", "six", "seven", "eight"] as const;
@@ -53,24 +51,19 @@ export function countWords(count: number): string {
 }
 
 /** The pick at a probe; null where the probe points at nothing. */
-export function pickAt<P extends BoreMapPoint>(
-  series: BoreMapSeries<P>,
-  probe: Probe | null,
-): BoreMapPick<P> | null {
+export function pickAt<P extends MapPoint>(series: MapLines<P>, probe: Probe | null): P | null {
   if (!probe) return null;
-  const curve = series[probe.series];
-  const point = curve?.points[probe.point];
-  return curve && point ? { ...point, count: curve.count } : null;
+  return series[probe.series]?.points[probe.point] ?? null;
 }
 
 /** The probe on a curve at the diameter nearest to the wanted one; null for an unknown count. */
-export function probeNear(series: BoreMapSeries, count: number, bore_m: number): Probe | null {
+export function probeNear(series: MapLines, count: number, diameter_m: number): Probe | null {
   const index = series.findIndex((curve) => curve.count === count);
   const points = series[index]?.points ?? [];
   let best: Probe | null = null;
   let least = Infinity;
   points.forEach((point, n) => {
-    const off = Math.abs(point.bore_m - bore_m);
+    const off = Math.abs(point.diameter_m - diameter_m);
     if (off < least) {
       least = off;
       best = { series: index, point: n };
@@ -81,9 +74,9 @@ export function probeNear(series: BoreMapSeries, count: number, bore_m: number):
 
 /** The probe nearest to a place in the plot, measured in pixels. */
 export function probeAtPixel(
-  series: BoreMapSeries,
+  series: MapLines,
   quantity: BoreQuantity,
-  toX: (bore_m: number) => number,
+  toX: (diameter_m: number) => number,
   toY: (value_si: number) => number,
   x: number,
   y: number,
@@ -94,7 +87,7 @@ export function probeAtPixel(
     curve.points.forEach((point, n) => {
       const value = boreValue(point, quantity);
       if (value === null) return;
-      const off = (toX(point.bore_m) - x) ** 2 + (toY(value) - y) ** 2;
+      const off = (toX(point.diameter_m) - x) ** 2 + (toY(value) - y) ** 2;
       if (off < least) {
         least = off;
         best = { series: s, point: n };
@@ -104,44 +97,68 @@ export function probeAtPixel(
   return best;
 }
 
+/** A point between those of a curve, each figure read in proportion; null off the curve. */
+export function pointBetween(series: MapLines, count: number, diameter_m: number): MapPoint | null {
+  const points = series.find((line) => line.count === count)?.points ?? [];
+  const above = points.findIndex((point) => point.diameter_m >= diameter_m);
+  const next = points[above];
+  const before = points[above - 1] ?? next;
+  if (!next || !before || diameter_m < before.diameter_m) return null;
+  const span = next.diameter_m - before.diameter_m;
+  const share = span > 0 ? (diameter_m - before.diameter_m) / span : 0;
+  const mix = (a: number, b: number) => a + (b - a) * share;
+  return {
+    count,
+    diameter_m,
+    overall_length_m: mix(before.overall_length_m, next.overall_length_m),
+    clearance_m: mix(before.clearance_m, next.clearance_m),
+    pipe_resonance_hz: mix(before.pipe_resonance_hz, next.pipe_resonance_hz),
+    peak_air_speed_m_s:
+      before.peak_air_speed_m_s === null || next.peak_air_speed_m_s === null
+        ? null
+        : mix(before.peak_air_speed_m_s, next.peak_air_speed_m_s),
+    fits: before.fits && next.fits,
+  };
+}
+
 /** The probe moved along its curve, kept inside it. */
-export function stepAlong(series: BoreMapSeries, probe: Probe, steps: number): Probe {
+export function stepAlong(series: MapLines, probe: Probe, steps: number): Probe {
   const last = (series[probe.series]?.points.length ?? 1) - 1;
   return { ...probe, point: Math.min(last, Math.max(0, probe.point + steps)) };
 }
 
 /** The probe moved to the curve of more (+1) or fewer (−1) vents, at the nearest diameter. */
-export function stepCount(series: BoreMapSeries, probe: Probe, by: -1 | 1): Probe {
+export function stepCount(series: MapLines, probe: Probe, by: -1 | 1): Probe {
   const from = series[probe.series];
-  const bore_m = from?.points[probe.point]?.bore_m;
-  if (!from || bore_m === undefined) return probe;
+  const diameter_m = from?.points[probe.point]?.diameter_m;
+  if (!from || diameter_m === undefined) return probe;
   const counts = series
     .map((curve) => curve.count)
     .filter((count) => (count - from.count) * by > 0);
   if (counts.length === 0) return probe;
   const next = by > 0 ? Math.min(...counts) : Math.max(...counts);
-  return probeNear(series, next, bore_m) ?? probe;
+  return probeNear(series, next, diameter_m) ?? probe;
 }
 
 /** One candidate in words: "two vents, 101.0 mm: 15.6 m/s, 208.5 mm long, first pipe resonance 512 Hz". */
-export function describePick(pick: BoreMapPick, preferences: UnitPreferences): string {
+export function describePick(pick: MapPoint, preferences: UnitPreferences): string {
   const length = (value: number) => formatQuantity(value, "length", preferences).text;
   const parts = [
-    pick.air_speed_m_s === null
+    pick.peak_air_speed_m_s === null
       ? ""
-      : formatQuantity(pick.air_speed_m_s, "speed", preferences).text,
-    `${length(pick.length_m)} long`,
-    pick.pipe_hz === null
-      ? ""
-      : `first pipe resonance ${formatQuantity(pick.pipe_hz, "frequency", preferences).text}`,
+      : formatQuantity(pick.peak_air_speed_m_s, "speed", preferences).text,
+    `${length(pick.overall_length_m)} long`,
+    pick.pipe_resonance_hz > 0
+      ? `first pipe resonance ${formatQuantity(pick.pipe_resonance_hz, "frequency", preferences).text}`
+      : "",
     pick.fits ? "fits" : "too long for the box",
   ];
-  return `${countWords(pick.count)}, ${length(pick.bore_m)}: ${parts.filter(Boolean).join(", ")}`;
+  return `${countWords(pick.count)}, ${length(pick.diameter_m)}: ${parts.filter(Boolean).join(", ")}`;
 }
 
 /** Smallest bore of each count that fits and stays inside the air-speed limit, in a sentence. */
 export function boreMapSummary(
-  series: BoreMapSeries,
+  series: MapLines,
   airSpeedLimit_m_s: number | null,
   preferences: UnitPreferences,
 ): string {
@@ -149,12 +166,14 @@ export function boreMapSummary(
     const fitting = points.filter((point) => point.fits);
     if (fitting.length === 0) return `${countWords(count)}: none fits`;
     const quiet = fitting.find(
-      ({ air_speed_m_s }) =>
-        airSpeedLimit_m_s !== null && air_speed_m_s !== null && air_speed_m_s <= airSpeedLimit_m_s,
+      ({ peak_air_speed_m_s }) =>
+        airSpeedLimit_m_s !== null &&
+        peak_air_speed_m_s !== null &&
+        peak_air_speed_m_s <= airSpeedLimit_m_s,
     );
-    if (quiet) return `inside the limit from ${describePick({ ...quiet, count }, preferences)}`;
+    if (quiet) return `inside the limit from ${describePick(quiet, preferences)}`;
     const widest = fitting[fitting.length - 1];
-    return widest ? `widest that fits: ${describePick({ ...widest, count }, preferences)}` : "";
+    return widest ? `widest that fits: ${describePick(widest, preferences)}` : "";
   });
   return `Bore map. ${sentences.filter(Boolean).join(". ")}.`;
 }

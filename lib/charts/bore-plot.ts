@@ -1,7 +1,7 @@
 /** One strip of the bore map made ready to be drawn. Pure data. */
 import type { UnitPreferences } from "@/lib/units/preferences";
 import { shownUnits } from "@/lib/units/shown-units";
-import type { BoreMapSeries, BoreQuantity } from "./bore-map";
+import type { MapLines, BoreQuantity } from "./bore-map";
 import { boreValue } from "./bore-map";
 import { valueAt } from "./cursor";
 import { zeroDomain } from "./domain";
@@ -26,7 +26,7 @@ export interface BorePlot {
 }
 
 export interface BorePlotInput {
-  series: BoreMapSeries;
+  series: MapLines;
   preferences: UnitPreferences;
   /** SI: the limit's line in this strip, and the chosen vent's value. */
   limit: number | null;
@@ -47,16 +47,18 @@ export function boreUnit(quantity: BoreQuantity, { system }: UnitPreferences): S
 }
 
 /** Bore axis in the shown length: from the smallest to the largest worth showing, by round steps. */
-export function boreDomain(series: BoreMapSeries, factor: number, cap: number | null): Domain {
+export function boreDomain(series: MapLines, factor: number, cap: number | null): Domain {
   let low = Infinity;
   let high = 0;
   for (const { points } of series) {
-    const lastFit = points.findLast((point) => point.fits)?.bore_m ?? points[0]?.bore_m ?? 0;
+    const lastFit =
+      points.findLast((point) => point.fits)?.diameter_m ?? points[0]?.diameter_m ?? 0;
     for (const point of points) {
-      const inside = cap === null || point.air_speed_m_s === null || point.air_speed_m_s <= cap;
-      if (inside && point.bore_m <= lastFit * 1.25) {
-        low = Math.min(low, point.bore_m * factor);
-        high = Math.max(high, point.bore_m * factor);
+      const inside =
+        cap === null || point.peak_air_speed_m_s === null || point.peak_air_speed_m_s <= cap;
+      if (inside && point.diameter_m <= lastFit * 1.25) {
+        low = Math.min(low, point.diameter_m * factor);
+        high = Math.max(high, point.diameter_m * factor);
       }
     }
   }
@@ -64,6 +66,9 @@ export function boreDomain(series: BoreMapSeries, factor: number, cap: number | 
   const step = niceStep(high - low, 8);
   return [Math.floor(low / step + 1e-9) * step, Math.ceil(high / step - 1e-9) * step];
 }
+
+/** Pipe resonances above this are out of every band a vented box plays [Hz]. */
+const PIPE_CAP = 1200;
 
 /** Air speeds above this are not shown: no vent is built there [m/s]. */
 export function airSpeedCap(limit: number | null, chosen: number | null): number {
@@ -79,13 +84,17 @@ export function borePlot(
   boreFactor: number,
 ): BorePlot {
   const unit = boreUnit(quantity, input.preferences);
-  const cap =
-    quantity === "air-speed" ? airSpeedCap(input.limit, input.chosen) : Number.POSITIVE_INFINITY;
+  const caps = {
+    "air-speed": airSpeedCap(input.limit, input.chosen),
+    length: Infinity,
+    pipe: PIPE_CAP,
+  };
+  const cap = caps[quantity];
   let high = Math.max(input.limit ?? 0, input.chosen ?? 0);
   for (const { points } of input.series)
     for (const point of points) {
       const value = boreValue(point, quantity);
-      const bore = point.bore_m * boreFactor;
+      const bore = point.diameter_m * boreFactor;
       if (
         value !== null &&
         bore >= x.domain[0] &&
@@ -106,22 +115,22 @@ export function borePlot(
     rows: rowsOf(quantity, input.series, unit.factor, boreFactor),
     tooLong:
       quantity === "air-speed" ? tooLongCorners(input.series, quantity, x, map, boreFactor) : "",
-    labels: labelsOf(quantity, input.series, x, map, boreFactor),
+    labels: labelsOf(quantity, input, x, map, boreFactor),
   };
 }
 
-function rowsOf(quantity: BoreQuantity, series: BoreMapSeries, factor: number, boreFactor: number) {
+function rowsOf(quantity: BoreQuantity, series: MapLines, factor: number, boreFactor: number) {
   const rows = new Map<number, Record<string, number | null>>();
   for (const { count, points } of series)
     points.forEach((point, n) => {
       const value = boreValue(point, quantity);
-      const row = rows.get(point.bore_m) ?? { b: point.bore_m * boreFactor };
+      const row = rows.get(point.diameter_m) ?? { b: point.diameter_m * boreFactor };
       const shown = value === null ? null : value * factor;
       const joins = !point.fits && (points[n - 1]?.fits || points[n + 1]?.fits);
       // The first point that no longer fits belongs to both parts, so that they meet.
       row[`fit${count}`] = point.fits || joins ? shown : null;
       row[`long${count}`] = point.fits ? null : shown;
-      rows.set(point.bore_m, row);
+      rows.set(point.diameter_m, row);
     });
   return [...rows.values()].sort((a, b) => (a.b ?? 0) - (b.b ?? 0));
 }
@@ -131,7 +140,7 @@ function rowsOf(quantity: BoreQuantity, series: BoreMapSeries, factor: number, b
  * each count stops fitting, and to the right of them.
  */
 export function tooLongCorners(
-  series: BoreMapSeries,
+  series: MapLines,
   quantity: BoreQuantity,
   x: Scale,
   map: PixelMap,
@@ -143,7 +152,7 @@ export function tooLongCorners(
     const value = end ? boreValue(end, quantity) : null;
     if (!end || value === null || last === points.length - 1) return [];
     const y = Math.min(map.bottom, Math.max(map.top, map.offset + map.gain * value));
-    return [{ x: x.toPixel(end.bore_m * boreFactor), y }];
+    return [{ x: x.toPixel(end.diameter_m * boreFactor), y }];
   });
   const first = ends.sort((a, b) => a.x - b.x)[0];
   const last = ends.at(-1);
@@ -160,7 +169,7 @@ export function tooLongCorners(
 
 function labelsOf(
   quantity: BoreQuantity,
-  series: BoreMapSeries,
+  { series, limit }: BorePlotInput,
   x: Scale,
   map: PixelMap,
   boreFactor: number,
@@ -168,7 +177,7 @@ function labelsOf(
   const places: number[] = [];
   for (let at = x.range[1] - 8; at > x.range[0] + 8; at -= 8) places.push(at);
   const curves = series.map(({ count, points }) => {
-    const bores = points.map((point) => point.bore_m * boreFactor);
+    const bores = points.map((point) => point.diameter_m * boreFactor);
     const values = points.map((point) => boreValue(point, quantity));
     const y = places.map((pixel) => {
       const value = valueAt(bores, values, x.toValue(pixel));
@@ -178,7 +187,8 @@ function labelsOf(
     return { text: COUNT_LABELS[count] ?? String(count), y };
   });
   const box = { top: map.top, bottom: map.bottom, left: x.range[0], right: x.range[1] };
-  return placeLabels(places, curves, [], { ...box, letter: 5.6, line: 12 });
+  const line = limit === null ? null : map.offset + map.gain * limit;
+  return placeLabels(places, curves, [places.map(() => line)], { ...box, letter: 5.6, line: 12 });
 }
 
 const COUNT_LABELS: Record<number, string> = { 1: "one vent", 2: "two", 3: "three", 4: "four" };

@@ -4,7 +4,7 @@
  */
 
 export interface StockBore {
-  bore_m: number;
+  diameter_m: number;
   name: string;
 }
 
@@ -13,16 +13,16 @@ const PORT = "moulded port, middle of the sizes sold";
 
 /** Ascending. */
 export const STOCK_BORES: readonly StockBore[] = [
-  { bore_m: 0.037, name: `38 mm ${PORT}` },
-  { bore_m: 0.05, name: `2 in ${PORT}` },
-  { bore_m: 0.052, name: `2 in ${PIPE}` },
-  { bore_m: 0.0665, name: `65–70 mm ${PORT}` },
-  { bore_m: 0.076, name: `3 in ${PORT}` },
-  { bore_m: 0.0773, name: `3 in ${PIPE}` },
-  { bore_m: 0.1005, name: `4 in ${PORT}` },
-  { bore_m: 0.1036, name: "110 mm drain pipe (EN 1401)" },
-  { bore_m: 0.126, name: `5 in ${PORT}` },
-  { bore_m: 0.151, name: `6 in ${PORT}` },
-  { bore_m: 0.1532, name: `6 in ${PIPE}` },
-  { bore_m: 0.2005, name: `8 in ${PORT}` },
+  { diameter_m: 0.037, name: `38 mm ${PORT}` },
+  { diameter_m: 0.05, name: `2 in ${PORT}` },
+  { diameter_m: 0.052, name: `2 in ${PIPE}` },
+  { diameter_m: 0.0665, name: `65–70 mm ${PORT}` },
+  { diameter_m: 0.076, name: `3 in ${PORT}` },
+  { diameter_m: 0.0773, name: `3 in ${PIPE}` },
+  { diameter_m: 0.1005, name: `4 in ${PORT}` },
+  { diameter_m: 0.1036, name: "110 mm drain pipe (EN 1401)" },
+  { diameter_m: 0.126, name: `5 in ${PORT}` },
+  { diameter_m: 0.151, name: `6 in ${PORT}` },
+  { diameter_m: 0.1532, name: `6 in ${PIPE}` },
+  { diameter_m: 0.2005, name: `8 in ${PORT}` },
 ];

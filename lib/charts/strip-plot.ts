@@ -78,7 +78,7 @@ export function stripPlot(
     definition,
     unit,
     domain,
-    ticks: linearTicks(domain, 4),
+    ticks: [...(definition.ticks ?? linearTicks(domain, 4))],
     map,
     lines,
     limit: inside ? shownLimit : null,

@@ -70,6 +70,8 @@ export interface StripDefinition {
   unit: (preferences: UnitPreferences) => StripUnit;
   series: (curves: Curves, ventNames: readonly string[]) => StripSeries[];
   limit: (limits: CurveLimits) => StripLimit | null;
+  /** In the shown unit, where round steps would not be the natural ones. */
+  ticks?: readonly number[];
   /** In the shown unit. */
   domain: (previous: Domain | null, extent: Extent, limit: number | null) => Domain;
 }
@@ -170,6 +172,7 @@ const definitions: Record<StripId, StripDefinition> = {
     unit: shownAs("angle", 0),
     series: (curves) => one(brokenAtWraps(curves.phase_deg)),
     limit: noLimit,
+    ticks: [-180, -90, 0, 90, 180],
     domain: () => [-180, 180],
   },
 };
