@@ -50,7 +50,7 @@ export function suggestBoxes(driver: Driver, options: SuggestOptions = {}): BoxS
   const qt = totalQ(qes, driver.qms);
   const vas = driver.count * driver.vas_m3;
   /** Q_T against that of B4: near 1 the families fall together, above it these two rise to a peak. */
-  const weak = qt / (fixedAlignment("B4", ql)?.qt ?? 0.38);
+  const nearness = qt / (fixedAlignment("B4", ql)?.qt ?? 0.38);
   const make = (
     id: BoxSuggestion["id"],
     title: string,
@@ -79,23 +79,23 @@ export function suggestBoxes(driver: Driver, options: SuggestOptions = {}): BoxS
       "gentle",
       "Gentle slope",
       "Begins to fall earlier but more slowly; room gain fills it in, and it settles sooner after a beat.",
-      weak < 0.93 ? alignmentFor("SC4", qt, ql) : null,
+      nearness < 0.93 ? alignmentFor("SC4", qt, ql) : null,
     ),
     ...make(
       "damped",
       "Tuned to the driver's resonance",
       "The least overhang of the vented boxes: the response of two damped resonances, an early and easy fall.",
-      weak < 1 ? alignmentFor("SBB4", qt, ql) : null,
+      nearness < 1 ? alignmentFor("SBB4", qt, ql) : null,
     ),
     ...assisted(driver.fs_hz, vas, qt, ql),
     ...closedBox(driver.fs_hz, vas, qt),
   ];
 }
 
-/** The flattest box: QB3 below the Q_T of B4, C4 above it, B4 within a percent. */
+/** The flattest box: QB3 below the Q_T of B4, C4 above it, B4 where they meet. */
 function flatBox(qt: number, ql: number | null): [string, string, Alignment | null] {
   const b4 = fixedAlignment("B4", ql);
-  if (b4 && Math.abs(qt / b4.qt - 1) < 0.01)
+  if (b4 && Math.abs(qt / b4.qt - 1) < 0.001)
     return ["Maximally flat", "Flat to the corner, then falls at 24 dB an octave.", b4];
   const qb3 = alignmentFor("QB3", qt, ql);
   if (qb3)
