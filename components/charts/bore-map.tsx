@@ -1,21 +1,17 @@
 "use client";
 
-import { useMemo, useRef, useState } from "react";
+import { useRef, useState } from "react";
 import type { Design } from "@/lib/document/schema";
 import { equalDiameter } from "@/lib/bore-map/candidate";
 import type { BoreMapPoint, BoreMapSeries } from "@/lib/bore-map/series";
 import type { Probe } from "@/lib/charts/bore-map";
 import {
-  BORE_QUANTITIES,
   boreMapSummary,
   describePick,
   pickAt,
   pointBetween,
   probeNear,
 } from "@/lib/charts/bore-map";
-import { airSpeedCap, boreDomain, borePlot, boreUnit } from "@/lib/charts/bore-plot";
-import { TICK_WIDTH } from "@/lib/charts/layout";
-import { linearScale } from "@/lib/charts/scale";
 import type { StockBore } from "@/lib/charts/stock-bores";
 import { STOCK_BORES } from "@/lib/charts/stock-bores";
 import type { UnitPreferences } from "@/lib/units/preferences";
@@ -23,6 +19,8 @@ import { BoreHand } from "./bore-hand";
 import { BoreMarks } from "./bore-marks";
 import { BoreStrip } from "./bore-strip";
 import { BoreTable } from "./bore-table";
+import type { ChosenVent } from "./use-bore-plots";
+import { useBorePlots } from "./use-bore-plots";
 import { useSame } from "./use-same";
 import { useWidth } from "./use-width";
 import styles from "./bore-map.module.css";
@@ -53,26 +51,11 @@ export function BoreMap(props: BoreMapProps) {
   const root = useRef<HTMLDivElement>(null);
   const width_px = useWidth(root);
   const [probe, setProbe] = useState<Probe | null>(null);
-  const width = Math.max(1, width_px - TICK_WIDTH - 8);
-  const boreFactor = boreUnit("length", preferences).factor;
-  const x = useMemo(() => {
-    const cap = driven ? airSpeedCap(limit, chosen?.peak_air_speed_m_s ?? null) : null;
-    return linearScale(boreDomain(series, boreFactor, cap), [0, width]);
-  }, [series, boreFactor, driven, limit, chosen, width]);
-  const plots = useMemo(() => {
-    const shown = BORE_QUANTITIES.filter((quantity) => driven || quantity !== "air-speed");
-    return (size === "small" ? shown.slice(0, 1) : shown).map((quantity, n) => {
-      const air = quantity === "air-speed";
-      const input = {
-        series,
-        preferences,
-        limit: air ? limit : null,
-        chosen: air ? (chosen?.peak_air_speed_m_s ?? null) : null,
-      };
-      const tall = size === "large" ? (n === 0 ? 280 : 110) : 150;
-      return borePlot(quantity, input, null, x, { top: 8, bottom: 8 + tall }, boreFactor);
-    });
-  }, [size, driven, series, preferences, limit, chosen, x, boreFactor]);
+  const { x, plots, boreFactor } = useBorePlots(
+    { series, limit, driven, chosen, preferences },
+    width_px,
+    size,
+  );
   const standing = chosen ? probeNear(series, chosen.count, chosen.diameter_m) : null;
   const start = standing ?? { series: 0, point: 0 };
   const pick = probe
@@ -142,7 +125,11 @@ export function BoreMap(props: BoreMapProps) {
 const NO_STOCK: readonly StockBore[] = [];
 
 /** The vent as it stands on the map; null for bare elements, which have no bore. */
-function chosenOf(design: Design, ventIndex: number, airSpeed_m_s: number | null) {
+function chosenOf(
+  design: Design,
+  ventIndex: number,
+  airSpeed_m_s: number | null,
+): ChosenVent | null {
   const vent = design.vents[ventIndex];
   if (!vent || "lumped" in vent) return null;
   return {

@@ -10,6 +10,7 @@ import { frequencyGrid, frequencyTicks, linearTicks } from "@/lib/charts/ticks";
 import { presentMark } from "@/lib/charts/marks";
 import type { UnitPreferences } from "@/lib/units/preferences";
 import { StripRow } from "./strip-row";
+import foot from "./strip-foot.module.css";
 import styles from "./strips.module.css";
 
 /** Units of the frame's own drawing, stretched to whatever room there is. */
@@ -96,8 +97,8 @@ export function CurveStripsFrame({
           </span>
         ))}
       </div>
-      <p className={styles.foot}>{message}</p>
-      {caution ? <p className={styles.caution}>{caution}</p> : null}
+      <p className={foot.foot}>{message}</p>
+      {caution ? <p className={foot.caution}>{caution}</p> : null}
     </div>
   );
 }

@@ -7,7 +7,7 @@ import type { StripId } from "@/lib/charts/strips";
 import { StripFigures } from "./strip-figures";
 import { StripMenu } from "./strip-menu";
 import { Key } from "./strip-values";
-import styles from "./strips.module.css";
+import styles from "./strip-foot.module.css";
 
 /** Level above which the hearing caution stands under the strips [dB]. */
 const LOUD = 85;

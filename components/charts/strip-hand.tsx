@@ -4,7 +4,7 @@ import { useRef } from "react";
 import type { KeyboardEvent, PointerEvent } from "react";
 import { clampCursor, stepCursor } from "@/lib/charts/cursor";
 import type { Scale } from "@/lib/charts/scale";
-import styles from "./strips.module.css";
+import styles from "./strip-cursor.module.css";
 
 /** Sideways movement after which a touch is taken to move the cursor, not to scroll [px]. */
 const TAKEN_AFTER = 6;

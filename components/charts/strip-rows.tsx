@@ -10,6 +10,7 @@ import { StripOverlay } from "./strip-overlay";
 import { StripRow } from "./strip-row";
 import { StripValues } from "./strip-values";
 import type { StripSheet } from "./use-strip-sheet";
+import cursor from "./strip-cursor.module.css";
 import styles from "./strips.module.css";
 
 /** The strips with the cursor through all of them. */
@@ -27,13 +28,13 @@ export function StripRows({
 }) {
   return (
     <div className={styles.rows}>
-      <div className={styles.marks} aria-hidden="true">
-        <div className={styles.tuning} data-tuning="" hidden>
+      <div className={cursor.marks} aria-hidden="true">
+        <div className={cursor.tuning} data-tuning="" hidden>
           <span>
             f<sub>B</sub> <span data-tuning-figure="" />
           </span>
         </div>
-        <div className={styles.line} data-cursor="" />
+        <div className={cursor.line} data-cursor="" />
       </div>
       <StripList
         curves={input.curves}
@@ -46,11 +47,11 @@ export function StripRows({
         range_hz={range_hz}
       />
       <div className={styles.axis} aria-hidden="true" />
-      <div className={styles.marks} aria-hidden="true">
-        <div className={styles.flag} data-cursor-flag="" />
+      <div className={cursor.marks} aria-hidden="true">
+        <div className={cursor.flag} data-cursor-flag="" />
       </div>
       {children}
-      <p className={styles.unit} aria-hidden="true">
+      <p className={cursor.unit} aria-hidden="true">
         Hz
       </p>
     </div>

@@ -1,15 +1,14 @@
 "use client";
 
-import { useLayoutEffect, useState } from "react";
+import { useEffect, useState } from "react";
 import type { RefObject } from "react";
 
 /** Width of an element [px]; 0 until it has been laid out. */
 export function useWidth(element: RefObject<HTMLElement | null>): number {
   const [width, setWidth] = useState(0);
-  useLayoutEffect(() => {
+  useEffect(() => {
     const node = element.current;
     if (!node) return;
-    setWidth(Math.floor(node.getBoundingClientRect().width));
     const observer = new ResizeObserver(([entry]) => {
       if (entry) setWidth(Math.floor(entry.contentRect.width));
     });

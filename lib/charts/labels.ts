@@ -64,7 +64,7 @@ export function placeLabels(
         // A label must also say which curve it means: where curves run together, it cannot.
         const alone = Math.min(...labelled.map((y) => Math.abs((y[i] ?? Infinity) - on)));
         // Beyond a line of room, more is no better: then the place further right wins.
-        const score = 2 * Math.min(clear, box.line) + Math.min(alone, box.line) + at / 2000;
+        const score = 2 * (Math.min(clear, box.line) + Math.min(alone, box.line)) + at / 2000;
         if (!best || score > best.score) best = { text: curve.text, x: at, y: middle + 4, score };
       }
     }
