@@ -1,7 +1,16 @@
 import type { SavedDesign } from "@/lib/designs/contract";
 
-export type OrderKey =
-  "name" | "tuning_hz" | "air_speed_m_s" | "ring_count" | "net_volume_m3" | "updated_at";
+/** What designs can be ordered by, and how it is called. */
+export const orderNames = {
+  name: "Name",
+  tuning_hz: "Tuning",
+  air_speed_m_s: "Air speed",
+  ring_count: "Rings",
+  net_volume_m3: "Net volume",
+  updated_at: "Changed",
+} as const;
+
+export type OrderKey = keyof typeof orderNames;
 
 export interface DesignOrder {
   key: OrderKey;

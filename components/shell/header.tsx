@@ -14,7 +14,7 @@ export interface SignedInAs {
 export function Header({ account }: { account: SignedInAs | null }) {
   return (
     <header className="site-header">
-      <Link href="/" className="flex items-center gap-2.5 py-2 pr-2">
+      <Link href="/" className="flex min-h-11 items-center gap-2.5 pr-2">
         <Mark />
         <span className="title-wide text-lg">Ventwright</span>
       </Link>

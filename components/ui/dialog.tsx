@@ -15,15 +15,19 @@ interface DialogProps {
 
 /**
  * A dialog that is open as long as it is mounted. The browser's own element keeps the focus
- * inside, closes on Escape and returns the focus where it came from.
+ * inside and closes on Escape; the focus goes back where it came from.
  */
 export function Dialog({ title, onClose, children, wide = false, aside = false }: DialogProps) {
   const element = useRef<HTMLDialogElement>(null);
   const titleId = useId();
   useEffect(() => {
     const dialog = element.current;
+    const before = document.activeElement;
     if (dialog && !dialog.open) dialog.showModal();
-    return () => dialog?.close();
+    return () => {
+      dialog?.close();
+      if (before instanceof HTMLElement) before.focus();
+    };
   }, []);
   const form = aside ? "sheet-dialog" : wide ? "wide-dialog" : "plain-dialog";
   return (

@@ -73,7 +73,7 @@ export function useQuantity(input: QuantityInput, preferences: UnitPreferences) 
     restore: () => setDraft(null),
     stepBy: (steps: number) => {
       const parsed = draft ? parseQuantity(text, kind, preferences) : null;
-      const from = parsed?.ok ? parsed.value : (value ?? Math.max(min, 0));
+      const from = parsed?.ok ? parsed.value : (value ?? 0);
       take(withoutNoise(stepped(from, steps, { kind, min, max, step }, preferences)));
     },
   };

@@ -1,4 +1,4 @@
-/** A quantity as it stands in a field: exact enough that leaving it untouched changes nothing. */
+/** A quantity as it stands in a field: all that was typed, none of the noise of conversion. */
 import { NO_FIGURE, trimmed } from "./format";
 import { tapeFraction } from "./fraction";
 import type { QuantityKind, UnitPreferences } from "./preferences";
@@ -11,8 +11,8 @@ const ON_THE_MARK = 5e-4;
 
 /**
  * The text of a field, without its unit. Inches on a mark of the tape are written as a fraction,
- * others as decimal inches, as calipers read; everything else with the kind's own places, and more
- * where the value has them.
+ * others as decimal inches, as calipers read. Everything else has the kind's own places: more where
+ * the value was typed with more, one more where it comes from the other system.
  */
 export function editableQuantity(
   value: number,
@@ -33,7 +33,8 @@ export function editableQuantity(
   const usual = shown.places(size);
   const whole = size >= 1 ? Math.floor(Math.log10(size)) + 1 : 0;
   const most = Math.min(Math.max(usual, SIGNIFICANT - whole), usual + 3);
-  const exact = trimmed(size.toFixed(most));
+  const typed = Math.abs(Number(size.toFixed(most)) - size) <= 1e-9 * size;
+  const exact = trimmed(size.toFixed(typed ? most : Math.min(most, usual + 1)));
   const places = exact.split(".")[1]?.length ?? 0;
   const plain = shown.trim || figure === 0 || places > usual ? exact : size.toFixed(usual);
   return (Number(plain) === 0 ? "" : sign) + plain;

@@ -23,11 +23,18 @@ export function stepped(
   if (shown === shownUnits[kind].metric) return bounded(from + steps * step);
   if (kind === "length") {
     const mark = step < TAPE_STEP ? THOUSANDTH : 0.0254 / tape;
-    return bounded((Math.round(from / mark) + steps) * mark);
+    return bounded(along(from / mark, steps) * mark);
   }
   const round = roundStep(step / shown.per);
   const figure = toShown(from, shown);
-  return bounded(fromShown((Math.round(figure / round) + steps) * round, shown));
+  return bounded(fromShown(along(figure / round, steps) * round, shown));
+}
+
+/** The mark so many steps on; from between two marks, the first step only reaches the next. */
+function along(marks: number, steps: number): number {
+  const nearest = Math.round(marks);
+  if (Math.abs(marks - nearest) < 1e-6) return nearest + steps;
+  return (steps > 0 ? Math.floor(marks) : Math.ceil(marks)) + steps;
 }
 
 /** The nearest of 1, 2, 5 × 10ⁿ. */

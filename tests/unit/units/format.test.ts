@@ -118,3 +118,12 @@ describe("reading back what was shown", () => {
     expect(editableQuantity(16, "voltage", metric)).toBe("16");
   });
 });
+
+describe("a field in the other system", () => {
+  it("has one place more, not all the digits of the conversion", () => {
+    // 68.4 L / 28.316846592 L per ft³ = 2.41552…
+    expect(editableQuantity(0.0684, "volume", tape16)).toBe("2.416");
+    expect(editableQuantity(0.0684, "volume", metric)).toBe("68.4");
+    expect(editableQuantity(0.01234, "length", metric)).toBe("12.34");
+  });
+});

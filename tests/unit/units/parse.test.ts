@@ -105,7 +105,7 @@ describe("what is not understood", () => {
 });
 
 describe("against the unit tables of an independent program", () => {
-  const math = create(unitDependencies) as Pick<MathJsInstance, "unit">;
+  const math = create(unitDependencies!) as Pick<MathJsInstance, "unit">;
   it.each([
     ["3.7 mm", "length", "3.7 mm", "m"],
     ["3.7 in", "length", "3.7 inch", "m"],
