@@ -7,7 +7,7 @@ import { useAccountForm } from "./use-account-form";
 
 export function SignInForm({ next }: { next: string | null }) {
   const form = useAccountForm("/api/sign-in", next);
-  const { state, faults, onBlur } = form;
+  const { state, faults, input } = form;
   const busy = state.step === "sending" || state.step === "keeping";
   return (
     <form method="post" noValidate className="flex flex-col gap-4" onSubmit={form.submit}>
@@ -19,7 +19,7 @@ export function SignInForm({ next }: { next: string | null }) {
         autoComplete="username"
         required
         fault={faults.email}
-        onBlur={onBlur}
+        {...input}
       />
       <TextField
         id="password"
@@ -29,7 +29,7 @@ export function SignInForm({ next }: { next: string | null }) {
         autoComplete="current-password"
         required
         fault={faults.password}
-        onBlur={onBlur}
+        {...input}
       />
       <FormNotice state={state} onRetry={form.keepWork} onGoOn={() => form.goOn()} />
       <Button type="submit" tone="primary" busy={busy} className="min-h-11">

@@ -10,7 +10,7 @@ import { useAccountForm } from "./use-account-form";
 export function SignUpForm({ next }: { next: string | null }) {
   const form = useAccountForm("/api/sign-up", next);
   const preferences = useSessionPreferences();
-  const { state, faults, onBlur } = form;
+  const { state, faults, input } = form;
   const busy = state.step === "sending" || state.step === "keeping";
   /** The new account reads numbers as the visitor did. */
   const keepPreferences = () =>
@@ -30,7 +30,7 @@ export function SignUpForm({ next }: { next: string | null }) {
         maxLength={120}
         required
         fault={faults.name}
-        onBlur={onBlur}
+        {...input}
       />
       <TextField
         id="shopName"
@@ -40,7 +40,7 @@ export function SignUpForm({ next }: { next: string | null }) {
         autoComplete="organization"
         maxLength={120}
         fault={faults.shopName}
-        onBlur={onBlur}
+        {...input}
       />
       <TextField
         id="email"
@@ -51,7 +51,7 @@ export function SignUpForm({ next }: { next: string | null }) {
         maxLength={254}
         required
         fault={faults.email}
-        onBlur={onBlur}
+        {...input}
       />
       <TextField
         id="password"
@@ -63,7 +63,7 @@ export function SignUpForm({ next }: { next: string | null }) {
         minLength={10}
         required
         fault={faults.password}
-        onBlur={onBlur}
+        {...input}
       />
       <FormNotice state={state} onRetry={form.keepWork} onGoOn={() => form.goOn()} />
       <Button type="submit" tone="primary" busy={busy} className="min-h-11">

@@ -1,6 +1,6 @@
 "use client";
 
-import { useState, type FocusEvent, type SubmitEvent } from "react";
+import { useState, type FocusEvent, type FormEvent, type SubmitEvent } from "react";
 import { keepVisitorDraft } from "@/lib/bench/draft";
 import { ask, AskError } from "@/lib/platform/ask";
 
@@ -70,6 +70,7 @@ export function useAccountForm(path: "/api/sign-in" | "/api/sign-up", next: stri
     } catch (error) {
       if (!(error instanceof AskError)) throw error;
       setFaults(error.fields);
+      if (Object.keys(error.fields).length > 0) return setState({ step: "open" });
       const { code, message, requestId } = error;
       return setState({ step: "refused", refusal: { code, message, requestId } });
     }
@@ -81,10 +82,14 @@ export function useAccountForm(path: "/api/sign-in" | "/api/sign-up", next: stri
     faults,
     keepWork,
     goOn,
-    onBlur: (event: FocusEvent<HTMLInputElement>) => {
-      const { name, value } = event.currentTarget;
-      if (value !== "" || faults[name])
-        setFaults({ ...faults, [name]: faultOf(event.currentTarget) });
+    input: {
+      onBlur: ({ currentTarget: input }: FocusEvent<HTMLInputElement>) => {
+        if (input.value !== "") setFaults({ ...faults, [input.name]: faultOf(input) });
+      },
+      /** A fault goes as soon as it is mended: later, the button would move away from the hand. */
+      onInput: ({ currentTarget: input }: FormEvent<HTMLInputElement>) => {
+        if (faults[input.name]) setFaults({ ...faults, [input.name]: faultOf(input) });
+      },
     },
     /** Sends what the form holds, unless something in it is wrong: that is said and focused. */
     submit: (event: SubmitEvent<HTMLFormElement>, afterwards?: () => Promise<unknown>) => {

@@ -1,5 +1,6 @@
 "use client";
 
+import { useRouter } from "next/navigation";
 import { useState } from "react";
 import { Icon } from "@/components/ui/icons";
 import { Menu } from "@/components/ui/menu";
@@ -10,12 +11,14 @@ import type { SignedInAs } from "./header";
 
 /** Who is signed in, in which shop, and the way out. On a phone the places to go stand here too. */
 export function AccountMenu({ account }: { account: SignedInAs }) {
+  const router = useRouter();
   const [leaving, setLeaving] = useState(false);
   const leave = async () => {
     setLeaving(true);
     try {
       await ask("/api/sign-out", { method: "POST", body: {} });
-      window.location.assign("/");
+      router.replace("/");
+      router.refresh();
     } catch (error) {
       setLeaving(false);
       const message = error instanceof Error ? error.message : "The server did not answer.";
