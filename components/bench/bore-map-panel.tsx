@@ -1,7 +1,7 @@
 "use client";
 
 import dynamic from "next/dynamic";
-import { useState } from "react";
+import { useMemo, useState } from "react";
 import { applyCandidate } from "@/lib/bore-map/apply";
 import { boreMapSeries, type BoreMapPoint } from "@/lib/bore-map/series";
 import { useBoreField } from "@/lib/bore-map/use-bore-field";
@@ -22,10 +22,12 @@ export function BoreMapPanel() {
   const store = useBenchStore();
   const [preferences] = useUnitPreferences();
   const [large, setLarge] = useState(false);
-  const field = useBoreField(design, ventIndex);
-  const series = field.field ? boreMapSeries(field.field, design) : null;
-  const pick = (point: BoreMapPoint) =>
+  const { field, message } = useBoreField(design, ventIndex);
+  const series = useMemo(() => (field ? boreMapSeries(field, design) : null), [field, design]);
+  const pick = (point: BoreMapPoint) => {
     store.getState().change(applyCandidate(design, ventIndex, point), "commit");
+    setLarge(false);
+  };
   const chart = (size: "small" | "large") =>
     series && (
       <BoreMap
@@ -48,8 +50,8 @@ export function BoreMapPanel() {
           </button>
         )}
       </header>
-      {field.message && <p className="text-sm text-ink-2">{field.message}</p>}
-      {chart("small") ?? (!field.message && <div className="bore-map-frame" aria-hidden="true" />)}
+      {message && <p className="text-sm text-ink-2">{message}</p>}
+      {chart("small") ?? (!message && <div className="bore-map-frame" aria-hidden="true" />)}
       {large && (
         <Dialog title="Bore map" wide onClose={() => setLarge(false)}>
           {chart("large")}
