@@ -20,8 +20,7 @@ export function DrawingRegion({ revision, drawn }: { revision: string; drawn: st
         vent={ventIndex}
         answer={answer}
         preferences={preferences}
-        revision={revision}
-        drawn={drawn}
+        title={{ revision, date: drawn }}
         selected={selection}
         onSelect={select}
         onChange={change}

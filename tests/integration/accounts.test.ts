@@ -77,10 +77,11 @@ describe("accounts", () => {
   test("a write from another site is refused", async () => {
     const person = await newPerson();
     const { POST } = await import("@/app/api/sign-out/route");
-    for (const headers of [
+    const foreign: Record<string, string>[] = [
       { origin: "http://elsewhere.example" },
       { "sec-fetch-site": "cross-site" },
-    ])
+    ];
+    for (const headers of foreign)
       expect((await call(POST, { as: person, method: "POST", body: {}, headers })).status).toBe(
         403,
       );

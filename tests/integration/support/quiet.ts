@@ -10,7 +10,7 @@ beforeEach(() => {
 
 afterEach(() => {
   for (const [method, spy] of spies) {
-    const calls = spy.mock.calls.map((call) => call.join(" "));
+    const calls = spy.mock.calls.map((call: unknown[]) => call.join(" "));
     spy.mockRestore();
     expect(calls, `console.${method} was called`).toEqual([]);
   }

@@ -1,0 +1,255 @@
+/** What is lettered beside the section: diameters, radii, end corrections, stroke, datum. */
+import type { DrawingText } from "./drawing-text";
+import {
+  boxesOverlap,
+  placeLabels,
+  textBox,
+  type Box,
+  type LabelRequest,
+  type PlacedLabel,
+} from "./place-labels";
+import type { Section } from "./section";
+import type { SectionPart } from "./section-parts";
+import type { SheetFrame } from "./sheet-frame";
+import { textWidth } from "./text-width";
+
+/** An end's correction as drawn: ghost air from the face outwards. */
+export interface GhostAir {
+  end: "outer" | "inner";
+  correction_m: number;
+  /** Sheet positions; for a negative correction `to` lies inside the vent. */
+  from: number;
+  to: number;
+  half: number;
+}
+
+export interface AirStroke {
+  /** Peak to peak [m]. */
+  stroke_m: number;
+  speed_m_s: number;
+  frequency_hz: number;
+  /** Sheet positions of the arrow's ends, of its line, and half the slug's width. */
+  x0: number;
+  x1: number;
+  y: number;
+  slug: number;
+}
+
+interface Wish extends LabelRequest {
+  /** Places tried before the rows above: middle of the text and baseline. */
+  places: { x: number; y: number; leader?: boolean }[];
+}
+
+/** Places every annotation; those beside their part first, the rest in rows above. */
+export function placeAnnotations(
+  section: Section,
+  parts: SectionPart[],
+  frame: SheetFrame,
+  air: { ghosts: GhostAir[]; stroke: AirStroke | null; boreAt: number },
+  text: DrawingText,
+): PlacedLabel[] {
+  const solids = parts.map((part) => partBox(part, frame));
+  const wishes = [
+    ...flareWishes(section, frame, text),
+    ...airWishes(section, frame, air, text),
+    ...partWishes(section, parts, frame, text),
+  ];
+  const placed: PlacedLabel[] = [];
+  const leftOver: LabelRequest[] = [];
+  const kept = reservedBoxes(frame, air);
+  for (const wish of wishes) {
+    const found = wish.places
+      .map(({ x, y, leader }) => labelAt(wish, x, y, leader ?? false))
+      .find(
+        ({ box }) =>
+          box.x0 >= 3 &&
+          box.x1 <= frame.width - 3 &&
+          ![...solids, ...kept, ...placed.map((label) => label.box)].some((other) =>
+            boxesOverlap(box, other, 2),
+          ),
+      );
+    if (found) placed.push(found);
+    else leftOver.push(wish);
+  }
+  const above = placeLabels(leftOver, {
+    direction: -1,
+    startY: frame.top - 9,
+    minX: 4,
+    maxX: frame.width - 4,
+    rows: 5,
+    obstacles: [...solids, ...kept, ...placed.map((label) => label.box)],
+    beside: true,
+  });
+  return [...placed, ...above];
+}
+
+/** Lines that lettering beside the axis keeps clear of. */
+function reservedBoxes(
+  frame: SheetFrame,
+  air: { stroke: AirStroke | null; boreAt: number },
+): Box[] {
+  const { axis } = frame.transform;
+  const boxes: Box[] = [{ x0: -1e5, x1: 1e5, y0: axis - 0.5, y1: axis + 0.5 }];
+  const { stroke } = air;
+  if (stroke) boxes.push({ x0: stroke.x0, x1: stroke.x1, y0: stroke.y - 2, y1: stroke.y + 2 });
+  return boxes;
+}
+
+function partBox(part: SectionPart, { transform }: SheetFrame): Box {
+  const low = Math.min(...part.outlines.flat().map((point) => Math.abs(point.y)));
+  const high = Math.max(...part.outlines.flat().map((point) => point.y));
+  return {
+    x0: transform.x(part.x0),
+    x1: transform.x(part.x1),
+    y0: transform.axis - high * transform.scale,
+    y1: transform.axis - low * transform.scale,
+  };
+}
+
+function labelAt(wish: Wish, x: number, y: number, withLeader: boolean): PlacedLabel {
+  const box = textBox(wish.text, x, y);
+  const right = wish.anchorX > box.x1;
+  const leader = withLeader
+    ? {
+        x0: wish.anchorX,
+        y0: wish.anchorY,
+        x1: right ? box.x1 + 2 : wish.anchorX < box.x0 ? box.x0 - 2 : wish.anchorX,
+        y1: right || wish.anchorX < box.x0 ? y - 4 : box.y1,
+      }
+    : null;
+  return { id: wish.id, text: wish.text, x, y, box, leader };
+}
+
+function flareWishes(section: Section, frame: SheetFrame, text: DrawingText): Wish[] {
+  const { profile } = section;
+  const { x, axis, scale } = frame.transform;
+  const wishes: Wish[] = [];
+  const wish = (end: "outer" | "inner", R: number, r: number, plane: number) => {
+    if (R <= 0) return;
+    const sign = end === "outer" ? -1 : 1;
+    const inset = R * (1 - Math.SQRT1_2);
+    const label = `R ${text.bare(R / 1000)}`;
+    const half = textWidth(label) / 2;
+    const beside = x(plane) + sign * (16 + half);
+    const anchorY = axis - (r + inset) * scale;
+    wishes.push({
+      id: `flare-${end}`,
+      text: label,
+      anchorX: x(plane - sign * inset),
+      anchorY,
+      places: [12, 26, 40, 0].map((lift) => ({ x: beside, y: anchorY - lift, leader: true })),
+    });
+  };
+  wish("outer", profile.outerFlare, profile.mouthRadius, profile.mouth);
+  wish("inner", profile.innerFlare, profile.endRadius, profile.end);
+  return wishes;
+}
+
+function airWishes(
+  section: Section,
+  frame: SheetFrame,
+  { ghosts, stroke, boreAt }: { ghosts: GhostAir[]; stroke: AirStroke | null; boreAt: number },
+  text: DrawingText,
+): Wish[] {
+  const { axis, scale, x } = frame.transform;
+  const radius = Math.min(section.profile.mouthRadius, section.profile.endRadius);
+  const halfBore = radius * scale;
+  const { slot } = section;
+  const bore = slot
+    ? `slot ${text.bare(slot.width / 1000)} × ${text.bare(slot.height / 1000)}`
+    : `Ø ${text.bare((2 * radius) / 1000)}`;
+  const boreHalf = textWidth(bore) / 2;
+  const inside = halfBore >= 17;
+  const wishes: Wish[] = [
+    {
+      id: "bore",
+      text: bore,
+      anchorX: boreAt,
+      anchorY: axis - halfBore,
+      places: inside ? [1, -1].map((s) => ({ x: boreAt + s * (8 + boreHalf), y: axis - 5 })) : [],
+    },
+  ];
+  if (stroke) {
+    const label = `air stroke ${text.bare(stroke.stroke_m)} peak to peak at ${text.frequency(stroke.frequency_hz)}`;
+    const short = `stroke ${text.bare(stroke.stroke_m)} at ${text.frequency(stroke.frequency_hz)}`;
+    const long = x(section.profile.end) - x(section.profile.mouth) >= textWidth(label) + 12;
+    wishes.push({
+      id: "stroke",
+      text: long ? label : short,
+      anchorX: (stroke.x0 + stroke.x1) / 2,
+      anchorY: stroke.y,
+      places: halfBore >= 32 ? [{ x: (stroke.x0 + stroke.x1) / 2, y: stroke.y + 16 }] : [],
+    });
+  }
+  for (const ghost of ghosts) {
+    const label = `end air ${text.signed(ghost.correction_m)}`;
+    const sign = ghost.end === "outer" ? -1 : 1;
+    const tip = sign < 0 ? Math.min(ghost.from, ghost.to) : Math.max(ghost.from, ghost.to);
+    const at = tip + sign * (8 + textWidth(label) / 2);
+    wishes.push({
+      id: `end-air-${ghost.end}`,
+      text: label,
+      anchorX: (ghost.from + ghost.to) / 2,
+      anchorY: axis - ghost.half,
+      optional: true,
+      places: [
+        { x: at, y: axis - 7 },
+        { x: at, y: axis + 16 },
+      ],
+    });
+  }
+  return wishes;
+}
+
+function partWishes(
+  section: Section,
+  parts: SectionPart[],
+  frame: SheetFrame,
+  text: DrawingText,
+): Wish[] {
+  const { x, axis, scale } = frame.transform;
+  const above = (id: string, label: string, at: number, y: number, optional = false): Wish => ({
+    id,
+    text: label,
+    anchorX: x(at),
+    anchorY: y,
+    optional,
+    places: [],
+  });
+  const layers = section.layers.length;
+  const baffle = text.bare(section.panel / 1000);
+  const wishes: Wish[] = parts.some((part) => part.id === "panel")
+    ? [
+        above(
+          "panel",
+          layers > 1
+            ? `baffle ${layers} × ${text.bare(section.board / 1000)} = ${baffle}`
+            : `baffle ${baffle}`,
+          section.panel / 2,
+          frame.top,
+        ),
+      ]
+    : [];
+  const many = section.pieces.length > 6;
+  for (const piece of section.pieces) {
+    if (piece.x1 <= section.panel || section.slot) continue;
+    const visible = (Math.max(piece.x0, section.panel) + piece.x1) / 2;
+    const y = axis - piece.outer * scale;
+    const size = piece.outerKnown ? ` Ø ${text.bare((2 * piece.outer) / 1000)}` : "";
+    if (piece.kind === "bend")
+      wishes.push(above(`bend-${piece.index}`, "bend, drawn unfolded", visible, y, many));
+    else if (size !== "")
+      wishes.push(above(`outer-${piece.index}`, `${piece.kind}${size}`, visible, y, many));
+  }
+  const wall = parts.find((part) => part.kind === "wall");
+  if (wall)
+    wishes.push(
+      above(
+        "wall",
+        section.wallIsBack ? "back panel" : "wall it faces",
+        (wall.x0 + wall.x1) / 2,
+        frame.top,
+      ),
+    );
+  return wishes;
+}
