@@ -51,19 +51,22 @@ export function BoreMap(props: BoreMapProps) {
   const root = useRef<HTMLDivElement>(null);
   const width_px = useWidth(root);
   const [probe, setProbe] = useState<Probe | null>(null);
-  const { x, plots, boreFactor } = useBorePlots(
+  const { x, plots, inView, boreFactor } = useBorePlots(
     { series, limit, driven, chosen, preferences },
     width_px,
     size,
   );
-  const standing = chosen ? probeNear(series, chosen.count, chosen.diameter_m) : null;
+  const standing = chosen ? probeNear(inView, chosen.count, chosen.diameter_m) : null;
   const start = standing ?? { series: 0, point: 0 };
   const pick = probe
-    ? pickAt(series, probe)
+    ? pickAt(inView, probe)
     : chosen && pointBetween(series, chosen.count, chosen.diameter_m);
   const choose = (at: Probe) => {
-    const picked = pickAt(series, at);
-    if (picked) onPick?.(picked);
+    const picked = pickAt(inView, at);
+    // What does not fit can be looked at, not taken: the design could not be built.
+    if (!picked?.fits) return;
+    setProbe(null);
+    onPick?.(picked);
   };
   return (
     <div className={styles.map}>
@@ -82,7 +85,7 @@ export function BoreMap(props: BoreMapProps) {
                 />
                 <BoreMarks
                   plot={plot}
-                  series={series}
+                  series={inView}
                   x={x}
                   boreFactor={boreFactor}
                   chosen={chosen}
@@ -95,7 +98,7 @@ export function BoreMap(props: BoreMapProps) {
                 {n === 0 ? (
                   <BoreHand
                     plot={plot}
-                    series={series}
+                    series={inView}
                     x={x}
                     boreFactor={boreFactor}
                     probe={probe ?? start}

@@ -66,7 +66,7 @@ export function BoreMarks({
       ) : null}
       {plot.tooLong ? (
         <text x={x.range[1] - 3} y={plot.map.bottom - 5} className={styles.tooLongName}>
-          too long for the box
+          too long: under 1 Ø clear
         </text>
       ) : null}
       {series

@@ -2,7 +2,7 @@
 
 import { useState } from "react";
 import type { MapLines, MapPoint } from "@/lib/charts/bore-map";
-import { pickAt, probeNear } from "@/lib/charts/bore-map";
+import { pickAt, probeNear, roomWords } from "@/lib/charts/bore-map";
 import type { StockBore } from "@/lib/charts/stock-bores";
 import { formatQuantity, NO_FIGURE } from "@/lib/units/format";
 import type { QuantityKind, UnitPreferences } from "@/lib/units/preferences";
@@ -71,10 +71,15 @@ export function BoreTable<P extends MapPoint>({
                   <td>{value(pick.overall_length_m, "length")}</td>
                   <td>{value(pick.clearance_m, "length")}</td>
                   <td>{value(pick.pipe_resonance_hz, "frequency")}</td>
-                  <td>{pick.fits ? "fits" : "too long"}</td>
+                  <td>{roomWords(pick)}</td>
                   {onPick ? (
                     <td>
-                      <button type="button" className="link" onClick={() => onPick(pick)}>
+                      <button
+                        type="button"
+                        className="link"
+                        hidden={!pick.fits}
+                        onClick={() => onPick(pick)}
+                      >
                         Use
                         <span className="sr-only">
                           {` ${pick.count} × ${value(pick.diameter_m, "length")}`}

@@ -1,7 +1,7 @@
 "use client";
 
 import { useMemo } from "react";
-import type { MapLines } from "@/lib/charts/bore-map";
+import type { MapLines, MapPoint } from "@/lib/charts/bore-map";
 import { BORE_QUANTITIES } from "@/lib/charts/bore-map";
 import type { BorePlot } from "@/lib/charts/bore-plot";
 import { airSpeedCap, boreDomain, borePlot, boreUnit } from "@/lib/charts/bore-plot";
@@ -16,8 +16,8 @@ export interface ChosenVent {
   peak_air_speed_m_s: number | null;
 }
 
-export interface BoreMapInput {
-  series: MapLines;
+export interface BoreMapInput<P extends MapPoint> {
+  series: MapLines<P>;
   /** Air-speed limit [m/s]. */
   limit: number | null;
   /** Whether there are air speeds at all. */
@@ -26,16 +26,25 @@ export interface BoreMapInput {
   preferences: UnitPreferences;
 }
 
+export interface BoreSheet<P extends MapPoint> {
+  x: Scale;
+  plots: BorePlot[];
+  /** The points that stand on the axis: those a probe can be moved to. */
+  inView: MapLines<P>;
+  /** Shown length per metre. */
+  boreFactor: number;
+}
+
 /** Free space above and below a plot [px]. */
 const MARGIN = 8;
 const HEIGHTS = { small: [150], large: [280, 110, 110] } as const;
 
 /** The strips of the bore map made ready for a width. Without a driver, length takes the first place. */
-export function useBorePlots(
-  { series, limit, driven, chosen, preferences }: BoreMapInput,
+export function useBorePlots<P extends MapPoint>(
+  { series, limit, driven, chosen, preferences }: BoreMapInput<P>,
   width_px: number,
   size: "small" | "large",
-): { x: Scale; plots: BorePlot[]; boreFactor: number } {
+): BoreSheet<P> {
   const width = Math.max(1, width_px - TICK_WIDTH - MARGIN);
   const boreFactor = boreUnit("length", preferences).factor;
   const speed = chosen?.peak_air_speed_m_s ?? null;
@@ -52,5 +61,11 @@ export function useBorePlots(
       return borePlot(quantity, input, null, x, height, boreFactor);
     });
   }, [size, driven, series, preferences, limit, speed, x, boreFactor]);
-  return { x, plots, boreFactor };
+  const inView = useMemo(() => {
+    const [low, high] = x.domain;
+    const within = (point: P) =>
+      point.diameter_m * boreFactor >= low && point.diameter_m * boreFactor <= high;
+    return series.map(({ count, points }) => ({ count, points: points.filter(within) }));
+  }, [series, boreFactor, x]);
+  return { x, plots, inView, boreFactor };
 }

@@ -27,6 +27,20 @@ export interface MapLine<P extends MapPoint = MapPoint> {
 
 export type MapLines<P extends MapPoint = MapPoint> = readonly MapLine<P>[];
 
+/** Clearance below which the wall starts to lengthen the vent, in bores: the trade's rule. */
+const WANTED_CLEARANCE = 1;
+
+/** Whether a candidate fits and keeps the wanted distance from the wall it faces. */
+export function isClear(point: MapPoint): boolean {
+  return point.fits && point.clearance_m >= WANTED_CLEARANCE * point.diameter_m;
+}
+
+/** How a candidate stands to the box, in words. */
+export function roomWords(point: MapPoint): string {
+  if (!point.fits) return "too long for the box";
+  return isClear(point) ? "fits" : "fits, but near the wall";
+}
+
 /** Where the person's probe stands: a curve and a point of it. */
 export interface Probe {
   series: number;
@@ -151,7 +165,7 @@ export function describePick(pick: MapPoint, preferences: UnitPreferences): stri
     pick.pipe_resonance_hz > 0
       ? `first pipe resonance ${formatQuantity(pick.pipe_resonance_hz, "frequency", preferences).text}`
       : "",
-    pick.fits ? "fits" : "too long for the box",
+    roomWords(pick),
   ];
   return `${countWords(pick.count)}, ${length(pick.diameter_m)}: ${parts.filter(Boolean).join(", ")}`;
 }
@@ -163,7 +177,7 @@ export function boreMapSummary(
   preferences: UnitPreferences,
 ): string {
   const sentences = series.map(({ count, points }) => {
-    const fitting = points.filter((point) => point.fits);
+    const fitting = points.filter(isClear);
     if (fitting.length === 0) return `${countWords(count)}: none fits`;
     const quiet = fitting.find(
       ({ peak_air_speed_m_s }) =>

@@ -2,7 +2,7 @@
 import type { UnitPreferences } from "@/lib/units/preferences";
 import { shownUnits } from "@/lib/units/shown-units";
 import type { MapLines, BoreQuantity } from "./bore-map";
-import { boreValue } from "./bore-map";
+import { boreValue, isClear } from "./bore-map";
 import { valueAt } from "./cursor";
 import { zeroDomain } from "./domain";
 import type { PlacedLabel } from "./labels";
@@ -18,7 +18,7 @@ export interface BorePlot {
   unit: StripUnit;
   domain: Domain;
   map: PixelMap;
-  /** In the shown units: bore in b, each count's value in fitN, what does not fit in longN. */
+  /** In the shown units: bore in b, each count's value in fitN, what is too long for it in longN. */
   rows: Record<string, number | null>[];
   /** Corners of the part that is too long for the box, "x,y x,y …"; "" where all fits. */
   tooLong: string;
@@ -51,8 +51,7 @@ export function boreDomain(series: MapLines, factor: number, cap: number | null)
   let low = Infinity;
   let high = 0;
   for (const { points } of series) {
-    const lastFit =
-      points.findLast((point) => point.fits)?.diameter_m ?? points[0]?.diameter_m ?? 0;
+    const lastFit = points.findLast(isClear)?.diameter_m ?? points[0]?.diameter_m ?? 0;
     for (const point of points) {
       const inside =
         cap === null || point.peak_air_speed_m_s === null || point.peak_air_speed_m_s <= cap;
@@ -126,10 +125,11 @@ function rowsOf(quantity: BoreQuantity, series: MapLines, factor: number, boreFa
       const value = boreValue(point, quantity);
       const row = rows.get(point.diameter_m) ?? { b: point.diameter_m * boreFactor };
       const shown = value === null ? null : value * factor;
-      const joins = !point.fits && (points[n - 1]?.fits || points[n + 1]?.fits);
-      // The first point that no longer fits belongs to both parts, so that they meet.
-      row[`fit${count}`] = point.fits || joins ? shown : null;
-      row[`long${count}`] = point.fits ? null : shown;
+      const clear = isClear(point);
+      const joins = !clear && [points[n - 1], points[n + 1]].some((next) => next && isClear(next));
+      // The first point that no longer stands clear belongs to both parts, so that they meet.
+      row[`fit${count}`] = clear || joins ? shown : null;
+      row[`long${count}`] = clear ? null : shown;
       rows.set(point.diameter_m, row);
     });
   return [...rows.values()].sort((a, b) => (a.b ?? 0) - (b.b ?? 0));
@@ -137,7 +137,7 @@ function rowsOf(quantity: BoreQuantity, series: MapLines, factor: number, boreFa
 
 /**
  * The part of the plot that is too long for the box: below the line through the points at which
- * each count stops fitting, and to the right of them.
+ * each count comes too near the wall, and to the right of them.
  */
 export function tooLongCorners(
   series: MapLines,
@@ -147,7 +147,7 @@ export function tooLongCorners(
   boreFactor: number,
 ): string {
   const ends = series.flatMap(({ points }) => {
-    const last = points.findLastIndex((point) => point.fits);
+    const last = points.findLastIndex(isClear);
     const end = points[Math.max(0, last)];
     const value = end ? boreValue(end, quantity) : null;
     if (!end || value === null || last === points.length - 1) return [];

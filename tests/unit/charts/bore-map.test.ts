@@ -6,6 +6,7 @@ import {
   pointBetween,
   probeAtPixel,
   probeNear,
+  roomWords,
   stepAlong,
   stepCount,
 } from "@/lib/charts/bore-map";
@@ -66,6 +67,13 @@ describe("the bore map", () => {
     expect(describePick(pick, metric).replace(/\s/g, " ")).toBe(
       "one vent, 100.0 mm: 16.0 m/s, 300.0 mm long, first pipe resonance 572 Hz, fits",
     );
+  });
+
+  it("tells a near wall from a box that is too short", () => {
+    const base = { ...lines[0]!.points[2]!, diameter_m: 0.1 };
+    expect(roomWords({ ...base, clearance_m: 0.1 })).toBe("fits");
+    expect(roomWords({ ...base, clearance_m: 0.099 })).toBe("fits, but near the wall");
+    expect(roomWords({ ...base, clearance_m: 0.2, fits: false })).toBe("too long for the box");
   });
 
   it("sums up from which bore each count is quiet enough", () => {
