@@ -29,8 +29,10 @@ export function CurvesRegion({ ready }: { ready: boolean }) {
   useEffect(() => setStrips(readStripChoice()), []);
   useEffect(
     () =>
-      store.subscribe(({ dragOrigin, answer: live }) => {
-        if (dragOrigin && live?.curves) handle.current?.live(live.curves);
+      store.subscribe(({ dragOrigin, answer: live }, old) => {
+        if (dragOrigin && live?.curves)
+          handle.current?.live(live.curves, { tuning_hz: live.tuning_hz });
+        else if (old.dragOrigin) handle.current?.settle();
       }),
     [store],
   );
@@ -42,6 +44,7 @@ export function CurvesRegion({ ready }: { ready: boolean }) {
       preferences={preferences}
       curves={curves}
       limits={limits}
+      caution={hearingCaution.text}
       message={design.driver ? undefined : "Curves need a driver."}
     />
   );

@@ -4,6 +4,7 @@ import { keyFiguresOf, type KeyFigures as Figures } from "@/lib/bench/key-figure
 import { formatQuantity } from "@/lib/units/format";
 import type { QuantityKind, UnitPreferences } from "@/lib/units/preferences";
 import { useUnitPreferences } from "@/components/shell/unit-preferences";
+import { Lettered } from "@/components/ui/lettered";
 import { useBench } from "./bench-context";
 import { WorkingButton } from "./working-button";
 
@@ -40,14 +41,16 @@ function KeyFigure(props: FigureText & { label: string; working: string }) {
     props.state === "within" ? "text-within" : props.state === "over" ? "text-over" : "text-ink-2";
   return (
     <div className="key-figure">
-      <dt className="flex items-baseline justify-between gap-2 text-sm text-ink-2">
-        <span>{props.label}</span>
+      <dt className="key-name">
+        <span className="truncate">
+          <Lettered text={props.label} />
+        </span>
         <WorkingButton figure={props.working} label={props.label} />
       </dt>
       <dd>
         <span className="figure-key">{props.value}</span>{" "}
         <span className="key-unit lettering text-ink-2">{props.unit}</span>
-        <span className={`key-below block text-sm ${tone}`}>{props.below}</span>
+        <span className={`key-below ${tone}`}>{props.below}</span>
       </dd>
     </div>
   );

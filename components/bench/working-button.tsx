@@ -14,7 +14,7 @@ export function WorkingButton({ figure, label }: { figure: string; label: string
     <>
       <button
         type="button"
-        className="link-quiet text-sm"
+        className="link-quiet key-working"
         aria-label={`Working of ${label}`}
         onClick={() => setOpen(true)}
       >

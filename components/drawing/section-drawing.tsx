@@ -120,12 +120,12 @@ function Drawing(props: SectionDrawingProps) {
         >
           {reason ?? pointed ?? (vent.count > 1 ? `${vent.count} vents alike; one is drawn` : "")}
         </p>
-        <div className="absolute top-2 right-2">
-          <ViewControls zoom={zoom} onZoom={look.zoomBy} onFit={look.reset} />
-        </div>
       </div>
       <div className="flex flex-wrap items-end justify-between gap-x-4 gap-y-1 px-3 pb-1">
-        <DimensionTable rows={dimensionRows(section, vent, figures, text)} summary={summary} />
+        <div className="flex flex-wrap items-center gap-x-4">
+          <ViewControls zoom={zoom} onZoom={look.zoomBy} onFit={look.reset} />
+          <DimensionTable rows={dimensionRows(section, vent, figures, text)} summary={summary} />
+        </div>
         <TitleBlock
           text={props.title ?? {}}
           scale={scaleName(sheet.frame.transform.scale * zoom)}

@@ -25,7 +25,7 @@ export const denSub = {
   },
   enclosure: {
     net_volume_m3: 0.06,
-    inside_m: { width: 0.36, height: 0.4, depth: 0.46 },
+    inside_m: { width: 0.37, height: 0.4, depth: 0.46 },
     panel_thickness_m: 0.036,
     ql: 7,
     qa: null,

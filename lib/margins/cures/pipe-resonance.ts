@@ -10,6 +10,8 @@ export function pipeResonanceCures(subject: Subject, vent: number): Cure[] {
   if (!first) return [];
   const frequency_hz = Math.floor(first / 2 ** PIPE_OCTAVES);
   const present = filterOf(design, "lowpass");
+  // Already low enough: being near is no fault to cure.
+  if (present && present.frequency_hz <= frequency_hz) return [];
   const filter: Filter = present
     ? { ...present, frequency_hz }
     : { kind: "lowpass", family: "linkwitz-riley", order: 4, frequency_hz };
