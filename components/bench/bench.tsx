@@ -38,7 +38,7 @@ export function Bench({ canEdit, state, actions, revision, drawn }: BenchProps) 
           <NumbersColumn />
         </fieldset>
         <div className="bench-middle">
-          <DrawingRegion revision={revision} drawn={drawn} />
+          <DrawingRegion canEdit={canEdit} revision={revision} drawn={drawn} />
           <CurvesRegion ready={ready} />
         </div>
         <div className="bench-margins">

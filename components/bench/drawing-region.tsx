@@ -4,8 +4,14 @@ import { SectionDrawing } from "@/components/drawing/section-drawing";
 import { useUnitPreferences } from "@/components/shell/unit-preferences";
 import { useBench, useBenchStore } from "./bench-context";
 
+interface DrawingRegionProps {
+  canEdit: boolean;
+  revision: string;
+  drawn: string;
+}
+
 /** The section drawing, live. */
-export function DrawingRegion({ revision, drawn }: { revision: string; drawn: string }) {
+export function DrawingRegion({ canEdit, revision, drawn }: DrawingRegionProps) {
   const store = useBenchStore();
   const design = useBench((state) => state.design);
   const answer = useBench((state) => state.answer);
@@ -23,7 +29,7 @@ export function DrawingRegion({ revision, drawn }: { revision: string; drawn: st
         title={{ revision, date: drawn }}
         selected={selection}
         onSelect={select}
-        onChange={change}
+        onChange={canEdit ? change : undefined}
       />
     </section>
   );

@@ -7,6 +7,7 @@ import { Moment } from "@/components/ui/moment";
 import type { SavedDesign } from "@/lib/designs/contract";
 import { formatQuantity, NO_FIGURE } from "@/lib/units/format";
 import type { QuantityKind } from "@/lib/units/preferences";
+import { SectionThumbnail } from "@/components/drawing/section-thumbnail";
 import { DesignName } from "./design-name";
 import type { DesignActions } from "./use-design-actions";
 
@@ -23,6 +24,7 @@ export function DesignRow({ design, canEdit, actions }: DesignRowProps) {
   return (
     <tr role="row" data-design={id}>
       <th role="rowheader" scope="row" className="design-name">
+        <SectionThumbnail design={design.document} />
         <DesignName
           id={id}
           name={name}

@@ -27,7 +27,7 @@ export function TitleBlock({
     ["Checked", text.checkedBy],
   ];
   return (
-    <dl className="lettering grid grid-cols-3 border-t border-l border-rule text-xs">
+    <dl className="lettering grid grid-cols-2 sm:grid-cols-3 border-t border-l border-rule text-xs">
       {cells
         .filter((cell): cell is [string, string] => cell[1] !== undefined)
         .map(([name, value]) => (

@@ -52,6 +52,9 @@ export interface SheetRequest {
   hold?: FrameHold;
 }
 
+/** Below this width [CSS px] lettering without room is left out. */
+const NARROW_PX = 520;
+
 const FIRST_ROOM = { above: 46, below: 62 };
 
 /** Lays out the sheet; lettering that needs more rows takes them from the section's own room. */
@@ -99,7 +102,14 @@ function attempt(
   const halfBore = Math.min(profile.mouthRadius, profile.endRadius) * transform.scale;
   const stroke = strokeOf(figures, section, frame, halfBore);
   const boreAt = boreLineAt(section, frame);
-  const annotations = placeAnnotations(section, parts, frame, { ghosts, stroke, boreAt }, text);
+  // What finds no room above a narrow sheet is left to the table of dimensions.
+  const annotations = placeAnnotations(
+    section,
+    parts,
+    frame,
+    { ghosts, stroke, boreAt },
+    text,
+  ).filter((label) => frame.width > NARROW_PX || label.box.y0 >= 2);
   const wall = parts.find((part) => part.kind === "wall");
   return {
     section,
