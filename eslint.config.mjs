@@ -27,24 +27,35 @@ const data = [
 ];
 
 const config = [
-  { ignores: [".next*/**", "node_modules/**", "next-env.d.ts", "db/migrations/**", ".data/**"] },
+  {
+    ignores: [
+      ".next*/**",
+      "node_modules/**",
+      "next-env.d.ts",
+      "db/migrations/**",
+      ".data/**",
+      "test-results/**",
+      "playwright-report/**",
+    ],
+  },
   ...next,
   ...typescript,
   forbid(
     ["lib/acoustics/**", "lib/workshop/**", "lib/margins/**", "lib/working/**", "lib/drawing/**"],
     [web, upwards, data],
   ),
-  forbid(["lib/**"], [upwards], [
-    "lib/acoustics/**",
-    "lib/workshop/**",
-    "lib/margins/**",
-    "lib/working/**",
-    "lib/drawing/**",
-  ]),
+  forbid(
+    ["lib/**"],
+    [upwards],
+    ["lib/acoustics/**", "lib/workshop/**", "lib/margins/**", "lib/working/**", "lib/drawing/**"],
+  ),
   forbid(["components/**"], [[["@/app/*"], upwards[1]], data]),
   forbid(["app/**"], [[["@/db/*"], data[1]]]),
   { rules: { "no-console": ["error", { allow: ["warn", "error"] }] } },
-  { files: ["scripts/**", "db/prepare.ts", "bench/**", "tests/**"], rules: { "no-console": "off" } },
+  {
+    files: ["scripts/**", "db/prepare.ts", "bench/**", "tests/**"],
+    rules: { "no-console": "off" },
+  },
 ];
 
 export default config;

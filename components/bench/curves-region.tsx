@@ -10,7 +10,14 @@ import { CurveStripsFrame } from "@/components/charts/curve-strips-frame";
 import type { CurveStripsHandle } from "@/components/charts/curve-strips";
 import { useUnitPreferences } from "@/components/shell/unit-preferences";
 import { useBenchStore } from "./bench-context";
+import { useBrowserValue, type BrowserValue } from "./use-browser-value";
 import { useSettled } from "./use-settled";
+
+const stripChoice: BrowserValue<readonly StripId[]> = {
+  read: readStripChoice,
+  keep: keepStripChoice,
+  usual: DEFAULT_STRIPS,
+};
 
 const CurveStrips = dynamic(
   () => import("@/components/charts/curve-strips").then((part) => part.CurveStrips),
@@ -23,10 +30,9 @@ export function CurvesRegion({ ready }: { ready: boolean }) {
   const { design, answer } = useSettled();
   const before = store.getState().before;
   const [preferences] = useUnitPreferences();
-  const [strips, setStrips] = useState<readonly StripId[]>(DEFAULT_STRIPS);
+  const [strips, setStrips] = useBrowserValue(stripChoice);
   const [cursor_hz, setCursor] = useState<number | null>(null);
   const handle = useRef<CurveStripsHandle>(null);
-  useEffect(() => setStrips(readStripChoice()), []);
   useEffect(
     () =>
       store.subscribe(({ dragOrigin, answer: live }, old) => {
@@ -59,10 +65,7 @@ export function CurvesRegion({ ready }: { ready: boolean }) {
           ventNames={design.vents.map((vent) => vent.name)}
           preferences={preferences}
           strips={strips}
-          onStripsChange={(next) => {
-            setStrips(next);
-            keepStripChoice(next);
-          }}
+          onStripsChange={setStrips}
           cursor_hz={cursor_hz ?? answer?.tuning_hz ?? 40}
           onCursor={setCursor}
           caution={hearingCaution.text}

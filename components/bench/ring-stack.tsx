@@ -1,25 +1,31 @@
 "use client";
 
-import { useEffect, useMemo, useState } from "react";
+import { useMemo, useState } from "react";
 import { planRings } from "@/lib/workshop/rings";
 import { InputError } from "@/lib/acoustics/input-error";
 import { applyRingPlan, ringRequest, type RingPlan } from "@/lib/bench/ring-plans";
-import { keepRingHabits, readRingHabits, usualHabits } from "@/lib/bench/sheets";
+import { keepRingHabits, readRingHabits, usualHabits, type RingHabits } from "@/lib/bench/sheets";
 import { formatQuantity } from "@/lib/units/format";
 import { useUnitPreferences } from "@/components/shell/unit-preferences";
 import { useBench, useBenchStore } from "./bench-context";
 import { RingNeighbours } from "./ring-neighbours";
 import { SheetsAtHand } from "./sheets-at-hand";
+import { useBrowserValue, type BrowserValue } from "./use-browser-value";
 import { useSettled } from "./use-settled";
+
+const ringHabits: BrowserValue<RingHabits> = {
+  read: readRingHabits,
+  keep: keepRingHabits,
+  usual: usualHabits,
+};
 
 /** The rings of the vent shown: one more and one less beside it, and the plans that meet the target. */
 export function RingStack() {
   const { design } = useSettled();
   const ventIndex = useBench((state) => state.ventIndex);
   const store = useBenchStore();
-  const [habits, setHabits] = useState(usualHabits);
+  const [habits, setHabits] = useBrowserValue(ringHabits);
   const [all, setAll] = useState(false);
-  useEffect(() => setHabits(readRingHabits()), []);
   const planned = useMemo(() => {
     const request = ringRequest(design, ventIndex, habits);
     if (!request)
@@ -65,13 +71,7 @@ export function RingStack() {
           ))}
         </ol>
       )}
-      <SheetsAtHand
-        habits={habits}
-        onChange={(next) => {
-          setHabits(next);
-          keepRingHabits(next);
-        }}
-      />
+      <SheetsAtHand habits={habits} onChange={setHabits} />
     </section>
   );
 }

@@ -33,7 +33,7 @@ export function WorkingSheet({ figure, onClose }: { figure: string; onClose: () 
           {working.note && <p className="text-sm text-ink-2">{working.note}</p>}
         </div>
       ) : (
-        <p>There is nothing to work out until the margins' first line is mended.</p>
+        <p>There is nothing to work out until the margins&rsquo; first line is mended.</p>
       )}
     </Sheet>
   );

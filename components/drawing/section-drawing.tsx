@@ -1,6 +1,6 @@
 "use client";
 
-import { useCallback, useId, useMemo, useRef, useState } from "react";
+import { useId, useMemo, useRef, useState } from "react";
 import type { Answer } from "@/lib/acoustics/answer";
 import { airwayAt } from "@/lib/bench/edits";
 import type { Design } from "@/lib/document/schema";
@@ -77,10 +77,7 @@ function Drawing(props: SectionDrawingProps) {
   const sheet = hold ? layOutSheet({ ...request, hold }) : free;
   const { section } = sheet;
   const handles = onChange ? handlesOf(design, props.vent, section, text) : [];
-  const nameOf = useCallback(
-    (part: string) => partName(part, section, vent, text),
-    [section, vent, text],
-  );
+  const nameOf = (part: string) => partName(part, section, vent, text);
   const pick = onSelect
     ? (part: DrawnPart) => onSelect({ piece: part.piece, kind: part.kind })
     : undefined;

@@ -4,9 +4,9 @@ import { join } from "node:path";
 import { describe, expect, test } from "vitest";
 import { denSub } from "@/lib/document/samples";
 import { roles } from "@/lib/shops/policy";
-import { call, newPerson, setRole, useDatabase, type Person } from "./support/shop";
+import { call, newPerson, setRole, ownDatabase, type Person } from "./support/shop";
 
-useDatabase();
+ownDatabase();
 
 type Reach = "anyone" | "signed in" | "readers" | "writers";
 const document = denSub;

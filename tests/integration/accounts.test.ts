@@ -1,8 +1,8 @@
 import { randomUUID } from "node:crypto";
 import { describe, expect, test } from "vitest";
-import { call, newPerson, PASSWORD, useDatabase, type Person } from "./support/shop";
+import { call, newPerson, PASSWORD, ownDatabase, type Person } from "./support/shop";
 
-useDatabase();
+ownDatabase();
 
 const signIn = async (email: string, password: string, address: string, as?: Person) => {
   const { POST } = await import("@/app/api/sign-in/route");

@@ -1,8 +1,8 @@
 import { describe, expect, test } from "vitest";
 import { denSub } from "@/lib/document/samples";
-import { call, newPerson, useDatabase, type Person } from "./support/shop";
+import { call, newPerson, ownDatabase, type Person } from "./support/shop";
 
-useDatabase();
+ownDatabase();
 
 const routes = async () => ({
   list: await import("@/app/api/designs/route"),

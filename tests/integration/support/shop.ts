@@ -27,7 +27,7 @@ vi.mock("react", async (original) => ({
 }));
 
 /** Copies the template into a database of this file's own. */
-export function useDatabase(): void {
+export function ownDatabase(): void {
   const name = `test_${randomUUID().replaceAll("-", "")}`;
   const template = new URL(process.env.DATABASE_URL ?? "");
   const server = new URL(template);
