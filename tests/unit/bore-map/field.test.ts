@@ -128,8 +128,12 @@ describe("boreMapSeries", () => {
     expect(series.air_speed_limit_m_s).toBe(17);
     for (const line of series.lines) {
       expect(line.flare).toEqual({ outer_m: 0.022, inner_m: 0.0127 });
-      const speeds = line.points.map((point) => point.peak_air_speed_m_s!);
-      for (let i = 1; i < speeds.length; i++) expect(speeds[i]!).toBeLessThan(speeds[i - 1]!);
+      // What is too long is solved with a bore of free air behind it: the line steps where that begins.
+      line.points.forEach((point, i) => {
+        const before = line.points[i - 1];
+        if (before && before.state === point.state)
+          expect(point.peak_air_speed_m_s!).toBeLessThan(before.peak_air_speed_m_s!);
+      });
     }
   });
 });
