@@ -22,6 +22,8 @@ process.env.NEXT_TELEMETRY_DISABLED = "1";
 const development = process.argv.includes("--dev");
 const folder = join(projectRoot, ".data");
 const owner = join(folder, "owner");
+/** Who serves: this script's process and the server's, so that a killed start leaves no orphan for long. */
+const served = join(folder, "served");
 
 requirePackages();
 const { clusterFolder, makeDatabase, newPassword, portIsFree, startCluster } =
@@ -50,6 +52,7 @@ const environment = {
 if (!development) requireBuild();
 run(process.execPath, [...tsx, "db/prepare.ts", "--seed"], { env: environment });
 
+stopOrphan();
 const host = process.env.HOST ?? "127.0.0.1";
 const port = await choosePort();
 const address = `http://${host === "0.0.0.0" ? "127.0.0.1" : host}:${port}`;
@@ -58,7 +61,11 @@ const server = start(
   [next, development ? "dev" : "start", "-H", host, "-p", String(port)],
   { env: environment },
 );
-stops.push(() => server.kill("SIGTERM"));
+writeFileSync(served, `${process.pid} ${server.pid}`);
+stops.push(() => {
+  rmSync(served, { force: true });
+  server.kill("SIGTERM");
+});
 server.on("exit", (code) => {
   if (!stopping) console.error("The server has ended.");
   stopAll(code ?? 1);
@@ -101,6 +108,19 @@ function otherOwnerLives() {
     return true;
   } catch {
     return false;
+  }
+}
+
+/** Ends a server whose start script was killed before it could stop it. */
+function stopOrphan() {
+  if (!existsSync(served)) return;
+  const [script, orphan] = readFileSync(served, "utf8").split(" ").map(Number);
+  try {
+    process.kill(script, 0);
+  } catch {
+    const command = `/proc/${orphan}/cmdline`;
+    if (existsSync(command) && readFileSync(command, "utf8").includes("next"))
+      process.kill(orphan, "SIGTERM");
   }
 }
 
