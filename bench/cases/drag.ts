@@ -21,7 +21,8 @@ export async function bench() {
     await session.send("Emulation.setCPUThrottlingRate", { rate: 4 });
     const times = await dragTube(page);
     times.sort((a, b) => a - b);
-    const at = (share: number) => times[Math.min(times.length - 1, Math.floor(share * times.length))]!;
+    const at = (share: number) =>
+      times[Math.min(times.length - 1, Math.floor(share * times.length))]!;
     return {
       name: "drag",
       median_ms: at(0.5),

@@ -38,7 +38,9 @@ export async function bench() {
     );
     const ready = marks[0];
     const late = new Set(
-      chartScripts.filter(({ began }) => ready !== undefined && began >= ready).map(({ url }) => url),
+      chartScripts
+        .filter(({ began }) => ready !== undefined && began >= ready)
+        .map(({ url }) => url),
     );
     const kib = (bytes: number) => bytes / 1024;
     const all = kib(sizes.reduce((sum, { bytes }) => sum + bytes, 0));

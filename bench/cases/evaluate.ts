@@ -1,0 +1,35 @@
+/** One whole answer on 400 frequencies of a design with two unlike vents. */
+import { evaluate } from "@/lib/acoustics";
+import { denSub } from "@/lib/document/samples";
+import { designSchema } from "@/lib/document/schema";
+
+const WARM_UP = 200;
+const RUNS = 400;
+
+export async function bench() {
+  const one = designSchema.parse(denSub);
+  const [vent] = one.vents;
+  if (!vent || "lumped" in vent) throw new Error("The sample design has no vent to double.");
+  const narrower = {
+    ...structuredClone(vent),
+    name: "Second",
+    bore: { shape: "round" as const, diameter_m: 0.076 },
+  };
+  const design = designSchema.parse({ ...one, vents: [vent, narrower] });
+  const times: number[] = [];
+  for (let run = 0; run < WARM_UP + RUNS; run++) {
+    const began = performance.now();
+    evaluate(design);
+    if (run >= WARM_UP) times.push(performance.now() - began);
+  }
+  times.sort((a, b) => a - b);
+  return {
+    name: "evaluate",
+    median_ms: times[times.length >> 1]!,
+    ratio_to_c: null,
+    notes: [
+      `95 of 100 within ${times[Math.floor(0.95 * times.length)]!.toFixed(2)} ms`,
+      "not yet set against a C computation",
+    ],
+  };
+}
