@@ -1,6 +1,8 @@
 "use client";
 
 import { keyFiguresOf, type KeyFigures as Figures } from "@/lib/bench/key-figures";
+import { tuningStatus } from "@/lib/margins/checks/tuning";
+import type { Status } from "@/lib/margins/margin";
 import { formatQuantity } from "@/lib/units/format";
 import type { QuantityKind, UnitPreferences } from "@/lib/units/preferences";
 import { useUnitPreferences } from "@/components/shell/unit-preferences";
@@ -33,12 +35,18 @@ interface FigureText {
   value: string;
   unit: string;
   below: string;
-  state?: "within" | "over" | "none";
+  state?: Status;
 }
 
+const tones: Record<Status, string> = {
+  within: "text-within",
+  near: "text-near",
+  over: "text-over",
+  unknown: "text-ink-2",
+};
+
 function KeyFigure(props: FigureText & { label: string; working: string }) {
-  const tone =
-    props.state === "within" ? "text-within" : props.state === "over" ? "text-over" : "text-ink-2";
+  const tone = props.state ? tones[props.state] : "text-ink-2";
   return (
     <div className="key-figure">
       <dt className="key-name">
@@ -76,7 +84,7 @@ function tuningText(figures: Figures, preferences: UnitPreferences): FigureText 
     below: near
       ? `on the ${target} target`
       : `${formatQuantity(Math.abs(off), "frequency", preferences).text} ${off < 0 ? "under" : "over"} the ${target} target`,
-    state: Math.abs(off) <= 0.015 * figures.target_hz ? "within" : "over",
+    state: tuningStatus(figures.tuning_hz, figures.target_hz),
   };
 }
 
@@ -109,8 +117,8 @@ function ringsText(figures: Figures, preferences: UnitPreferences): FigureText {
           `${count} × ${formatQuantity(thickness_m, "length", preferences).value}`,
       )
       .join(" + "),
-    unit: `${unit.unit}, + ${unit.value}`,
-    below: `overall ${overall.text}`,
+    unit: unit.unit,
+    below: `adds ${unit.text}, overall ${overall.text}`,
   };
 }
 

@@ -86,13 +86,13 @@ export const deskPair = {
       name: "Rear port",
       bore: { shape: "round", diameter_m: 0.044 },
       outer_end: { flare_radius_m: 0.012 },
-      pieces: [{ kind: "tube", length_m: 0.118, outer_diameter_m: 0.049 }],
+      pieces: [{ kind: "tube", length_m: 0.154, outer_diameter_m: 0.049 }],
       inner_end: { flare_radius_m: 0.01, form: "shell", wall_m: 0.0025 },
     },
   ],
-  drive: { voltage_v: 9 },
-  filters: [{ kind: "highpass", family: "butterworth", order: 2, frequency_hz: 38 }],
-  target: { tuning_hz: 50, air_speed_limit_m_s: 17 },
+  drive: { voltage_v: 7 },
+  filters: [{ kind: "highpass", family: "butterworth", order: 2, frequency_hz: 44 }],
+  target: { tuning_hz: 58, air_speed_limit_m_s: 17 },
 } satisfies DesignInput;
 
 /** A hall subwoofer with two long ports, stretched by rings of two sheets. */
@@ -113,7 +113,7 @@ export const hallTwelve = {
   },
   enclosure: {
     net_volume_m3: 0.12,
-    inside_m: { width: 0.46, height: 0.56, depth: 0.56 },
+    inside_m: { width: 0.44, height: 0.55, depth: 0.56 },
     panel_thickness_m: 0.036,
     ql: 7,
     qa: 80,
@@ -126,7 +126,7 @@ export const hallTwelve = {
       bore: { shape: "round", diameter_m: 0.1015 },
       outer_end: { flare_radius_m: 0.019 },
       pieces: [
-        { kind: "tube", length_m: 0.3, outer_diameter_m: 0.1143 },
+        { kind: "tube", length_m: 0.352, outer_diameter_m: 0.1143 },
         {
           kind: "rings",
           count: 3,
@@ -142,10 +142,10 @@ export const hallTwelve = {
           glue_line_m: 0.0001,
         },
       ],
-      inner_end: { flare_radius_m: 0.019 },
+      inner_end: { flare_radius_m: 0.0127 },
     },
   ],
-  drive: { voltage_v: 24 },
+  drive: { voltage_v: 22 },
   amplifier: { voltage_limit_v: 60, minimum_load_ohm: 2.5 },
   filters: [{ kind: "highpass", family: "butterworth", order: 4, frequency_hz: 22 }],
   target: { tuning_hz: 28, air_speed_limit_m_s: 17 },
@@ -172,7 +172,7 @@ export const hatchSlot = {
   },
   enclosure: {
     net_volume_m3: 0.055,
-    inside_m: { width: 0.6, height: 0.34, depth: 0.4 },
+    inside_m: { width: 0.46, height: 0.34, depth: 0.4 },
     panel_thickness_m: 0.018,
     ql: 8,
   },
@@ -181,7 +181,7 @@ export const hatchSlot = {
       name: "Floor slot",
       bore: { shape: "slot", width_m: 0.34, height_m: 0.032, shared_walls: 3 },
       outer_end: { flare_radius_m: 0.0127 },
-      pieces: [{ kind: "tube", length_m: 0.36 }],
+      pieces: [{ kind: "tube", length_m: 0.345 }],
       inner_end: { flare_radius_m: 0 },
     },
   ],
@@ -207,7 +207,7 @@ export const ventOnly = {
       bore: { shape: "round", diameter_m: 0.0762 },
       outer_end: { flare_radius_m: 0.016 },
       pieces: [
-        { kind: "tube", length_m: 0.14, outer_diameter_m: 0.0822 },
+        { kind: "tube", length_m: 0.174, outer_diameter_m: 0.0822 },
         {
           kind: "rings",
           count: 3,

@@ -1,9 +1,15 @@
-import { told, type Check } from "../margin";
+import { told, type Check, type Status } from "../margin";
 import { tuningSpread } from "../tuning-spread";
 
 /** How far off the target counts as met, and as near: shares of the tuning. A person hardly hears 1.5 %, and a sheet's thickness moves as much. */
 const MET = 0.015;
 const NEAR = 0.03;
+
+/** Where a tuning stands to its target. */
+export function tuningStatus(found_hz: number, target_hz: number): Status {
+  const share = Math.abs(found_hz - target_hz) / target_hz;
+  return share <= MET ? "within" : share <= NEAR ? "near" : "over";
+}
 
 export const tuning: Check = (subject) => {
   const { answer, design } = subject;
@@ -31,12 +37,11 @@ export const tuning: Check = (subject) => {
       },
     ];
   const off = found - target;
-  const share = Math.abs(off) / target;
   return [
     {
       id: "tuning",
       title,
-      status: share <= MET ? "within" : share <= NEAR ? "near" : "over",
+      status: tuningStatus(found, target),
       value,
       limit: told(subject, target, "frequency", { digits: 1 }),
       left: told(subject, off, "frequency", { digits: 1, signed: true }),

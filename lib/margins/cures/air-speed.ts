@@ -44,7 +44,7 @@ export function airSpeedCures(subject: Subject, vent: number): Cure[] {
     );
   const voltage_v = Math.floor(10 * design.drive.voltage_v * (limit / speed) * 0.995) / 10;
   const loss = 20 * Math.log10(design.drive.voltage_v / voltage_v);
-  if (voltage_v > 0)
+  if (voltage_v > 0 && speed > limit)
     cures.push({
       id: "drive",
       text: `Drive it with ${told(subject, voltage_v, "voltage")}`,
