@@ -51,6 +51,19 @@ const config = [
   ),
   forbid(["components/**"], [[["@/app/*"], upwards[1]], data]),
   forbid(["app/**"], [[["@/db/*"], data[1]]]),
+  {
+    files: ["app/**", "components/**", "lib/**"],
+    ignores: ["lib/accounts/session.ts"],
+    rules: {
+      "no-restricted-syntax": [
+        "error",
+        {
+          selector: "ImportSpecifier[imported.name='mintAuthorizedShopId']",
+          message: "Only the session gate mints a shop's scope. Take it from requireShop.",
+        },
+      ],
+    },
+  },
   { rules: { "no-console": ["error", { allow: ["warn", "error"] }] } },
   {
     files: ["scripts/**", "db/prepare.ts", "bench/**", "tests/**"],

@@ -5,7 +5,8 @@ import { NextResponse, type NextRequest } from "next/server";
  * the nonce of this very answer. It authorises nothing; that is the data layer's work.
  */
 export function proxy(request: NextRequest): NextResponse {
-  const requestId = request.headers.get("x-request-id") ?? crypto.randomUUID();
+  const given = request.headers.get("x-request-id") ?? "";
+  const requestId = /^[\w-]{8,64}$/.test(given) ? given : crypto.randomUUID();
   const nonce = btoa(crypto.randomUUID());
   const development = process.env.NODE_ENV === "development";
   const policy = [

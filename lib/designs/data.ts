@@ -45,9 +45,14 @@ function saved(row: Row): SavedDesign {
   };
 }
 
+/** Throws not_found for an id that the database could not even read. */
+export function requireId(id: string): void {
+  if (!uuid.test(id)) throw new AppError("not_found");
+}
+
 /** One design of the shop. Throws not_found, also for another shop's. */
 export async function getDesign(shop: AuthorizedShopId, id: string): Promise<SavedDesign> {
-  if (!uuid.test(id)) throw new AppError("not_found");
+  requireId(id);
   const [row] = await database()
     .select(columns)
     .from(designs)

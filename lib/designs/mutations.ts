@@ -9,7 +9,7 @@ import type { Design } from "@/lib/document/schema";
 import { AppError } from "@/lib/platform/errors";
 import type { AuthorizedShopId } from "@/lib/shops/scope";
 import type { SavedDesign } from "./contract";
-import { getDesign } from "./data";
+import { getDesign, requireId } from "./data";
 
 /** The key figures a list shows. A design that cannot be built has none, and may be kept all the same. */
 function figuresOf(document: Design) {
@@ -62,7 +62,7 @@ export async function saveDesign(
   version: number,
   document: Design,
 ): Promise<SavedDesign> {
-  const present = await getDesign(shop, id);
+  requireId(id);
   const [row] = await database()
     .update(designs)
     .set({
@@ -82,6 +82,8 @@ export async function saveDesign(
       ),
     )
     .returning({ id: designs.id });
+  // Read after the try: what stands now, or not_found where nothing of that id is the shop's.
+  const present = await getDesign(shop, id);
   if (!row)
     throw new AppError("conflict", {
       details: {
@@ -90,7 +92,7 @@ export async function saveDesign(
         updated_at: present.updated_at,
       },
     });
-  return getDesign(shop, id);
+  return present;
 }
 
 export async function renameDesign(
@@ -124,7 +126,7 @@ export async function deleteDesign(shop: AuthorizedShopId, id: string): Promise<
 
 /** Takes a deleted design back. Throws not_found where there is none of that id in the shop. */
 export async function restoreDesign(shop: AuthorizedShopId, id: string): Promise<SavedDesign> {
-  if (!/^[0-9a-f-]{36}$/i.test(id)) throw new AppError("not_found");
+  requireId(id);
   await database()
     .update(designs)
     .set({ deletedAt: null })

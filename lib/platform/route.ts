@@ -69,7 +69,8 @@ function requireSameOrigin(request: Request): void {
   const site = request.headers.get("sec-fetch-site");
   if (site && site !== "same-origin" && site !== "none") throw new AppError("foreign_origin");
   const origin = request.headers.get("origin");
-  if (origin && new URL(origin).host !== request.headers.get("host"))
+  // A sandboxed frame sends the word "null", which is no address at all.
+  if (origin && (!URL.canParse(origin) || new URL(origin).host !== request.headers.get("host")))
     throw new AppError("foreign_origin");
 }
 

@@ -79,6 +79,7 @@ describe("accounts", () => {
     const { POST } = await import("@/app/api/sign-out/route");
     const foreign: Record<string, string>[] = [
       { origin: "http://elsewhere.example" },
+      { origin: "null" },
       { "sec-fetch-site": "cross-site" },
     ];
     for (const headers of foreign)
