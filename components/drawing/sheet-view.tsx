@@ -75,7 +75,7 @@ function labelStyle({ id }: PlacedLabel, warn: boolean): string | undefined {
 
 /** Where the datum letter stands: left of the outer face, below the section. */
 function datumPlace({ frame }: Sheet) {
-  return { x: frame.transform.x(0), y: frame.bottom - 12 };
+  return { x: frame.transform.x(0), y: frame.bottom - 14 };
 }
 
 /** The filled triangle of a datum, its base on the panel's outer face. */

@@ -20,23 +20,27 @@ export interface HandleBindings {
   of: (handle: Handle) => object;
 }
 
-/** Dragging and stepping of the handles; while a hand holds one, the sheet's frame stands still. */
+/**
+ * Dragging and stepping of the handles; while a hand holds one, the sheet's frame stands still.
+ *
+ * @param frame - scale and place of the sheet as it is now; sheet units are CSS pixels
+ * @param onReason - why a handle goes no farther; null when that is over
+ * @param onHold - the frame to keep while a hand holds; undefined when it lets go
+ */
 export function useHandles(
   design: Design,
   frame: FrameHold,
-  /** CSS pixels on screen per sheet unit. */
-  screenScale: () => number,
   onChange: DesignChange | undefined,
   onReason: (reason: string | null) => void,
-): { bindings: HandleBindings; hold: FrameHold | undefined } {
+  onHold: (frame: FrameHold | undefined) => void,
+): HandleBindings {
   const grasp = useRef<Grasp | null>(null);
   const [held, setHeld] = useState<Handle["id"] | null>(null);
-  const [hold, setHold] = useState<FrameHold | undefined>();
 
   const take = (handle: Handle, pointer: Grasp["pointer"]) => {
     grasp.current = { handle, design, last: design, pointer };
     setHeld(handle.id);
-    setHold(frame);
+    onHold(frame);
   };
   const moveTo = (handle: Handle, wanted: number) => {
     const now = grasp.current;
@@ -59,7 +63,7 @@ export function useHandles(
     if (!now) return;
     grasp.current = null;
     setHeld(null);
-    setHold(undefined);
+    onHold(undefined);
     onReason(null);
     onChange?.(keep ? now.last : now.design, "commit");
   };
@@ -75,7 +79,7 @@ export function useHandles(
   const pointerMove = (event: PointerEvent<SVGGElement>) => {
     const now = grasp.current;
     if (!now?.pointer || now.pointer.id !== event.pointerId) return;
-    const perMm = frame.scale * screenScale();
+    const perMm = frame.scale;
     const inwards = (event.clientX - now.pointer.x) / perMm;
     const outwards = (now.pointer.y - event.clientY) / perMm;
     const { handle } = now;
@@ -96,21 +100,18 @@ export function useHandles(
     if (now) moveTo({ ...now.handle, value: NaN }, wanted);
   };
   return {
-    hold,
-    bindings: {
-      held,
-      of: (handle) => ({
-        onPointerDown: pointerDown(handle),
-        onPointerMove: pointerMove,
-        onPointerUp: () => letGo(true),
-        onPointerCancel: () => letGo(false),
-        onKeyDown: keyDown(handle),
-        onKeyUp: () => {
-          if (grasp.current && !grasp.current.pointer) letGo(true);
-        },
-        onBlur: () => letGo(true),
-      }),
-    },
+    held,
+    of: (handle) => ({
+      onPointerDown: pointerDown(handle),
+      onPointerMove: pointerMove,
+      onPointerUp: () => letGo(true),
+      onPointerCancel: () => letGo(false),
+      onKeyDown: keyDown(handle),
+      onKeyUp: () => {
+        if (grasp.current && !grasp.current.pointer) letGo(true);
+      },
+      onBlur: () => letGo(true),
+    }),
   };
 }
 

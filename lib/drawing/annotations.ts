@@ -48,7 +48,7 @@ export function placeAnnotations(
   air: { ghosts: GhostAir[]; stroke: AirStroke | null; boreAt: number },
   text: DrawingText,
 ): PlacedLabel[] {
-  const solids = parts.map((part) => partBox(part, frame));
+  const solids = parts.flatMap((part) => partBoxes(part, frame));
   const wishes = [
     ...flareWishes(section, frame, text),
     ...airWishes(section, frame, air, text),
@@ -90,20 +90,27 @@ function reservedBoxes(
 ): Box[] {
   const { axis } = frame.transform;
   const boxes: Box[] = [{ x0: -1e5, x1: 1e5, y0: axis - 0.5, y1: axis + 0.5 }];
-  const { stroke } = air;
+  const { stroke, boreAt } = air;
+  boxes.push({ x0: boreAt - 1, x1: boreAt + 1, y0: axis, y1: axis + 1e4 });
   if (stroke) boxes.push({ x0: stroke.x0, x1: stroke.x1, y0: stroke.y - 2, y1: stroke.y + 2 });
   return boxes;
 }
 
-function partBox(part: SectionPart, { transform }: SheetFrame): Box {
-  const low = Math.min(...part.outlines.flat().map((point) => Math.abs(point.y)));
-  const high = Math.max(...part.outlines.flat().map((point) => point.y));
-  return {
+/** What a part covers above and below the axis; one box where it crosses it. */
+function partBoxes(part: SectionPart, { transform }: SheetFrame): Box[] {
+  const heights = part.outlines.flat().map((point) => point.y);
+  const low = Math.min(...heights);
+  const high = Math.max(...heights);
+  const box = (from: number, to: number): Box => ({
     x0: transform.x(part.x0),
     x1: transform.x(part.x1),
-    y0: transform.axis - high * transform.scale,
-    y1: transform.axis - low * transform.scale,
-  };
+    y0: transform.axis - to * transform.scale,
+    y1: transform.axis - from * transform.scale,
+  });
+  const boxes: Box[] = [];
+  if (part.side !== "below") boxes.push(box(low, high));
+  if (part.side !== "above") boxes.push(box(-high, -low));
+  return boxes;
 }
 
 function labelAt(wish: Wish, x: number, y: number, withLeader: boolean): PlacedLabel {
@@ -145,6 +152,17 @@ function flareWishes(section: Section, frame: SheetFrame, text: DrawingText): Wi
   return wishes;
 }
 
+/** Half height of a bore on the sheet from which the stroke is lettered inside it [px]. */
+const STROKE_TEXT_FROM = 28;
+
+/** How far solids stand above the axis at a place of the sheet [px]. */
+function outsideAt(section: Section, { transform }: SheetFrame, at: number): number {
+  const outer = section.pieces
+    .filter((piece) => transform.x(piece.x0) <= at && transform.x(piece.x1) >= at)
+    .map((piece) => piece.outer);
+  return Math.max(0, ...outer) * transform.scale;
+}
+
 function airWishes(
   section: Section,
   frame: SheetFrame,
@@ -159,26 +177,38 @@ function airWishes(
     ? `slot ${text.bare(slot.width / 1000)} × ${text.bare(slot.height / 1000)}`
     : `Ø ${text.bare((2 * radius) / 1000)}`;
   const boreHalf = textWidth(bore) / 2;
-  const inside = halfBore >= 17;
+  /** Right above whatever stands over a place of the bore. */
+  const over = (at: number, lift: number) => ({
+    x: at,
+    y: axis - outsideAt(section, frame, at) - lift,
+    leader: true,
+  });
   const wishes: Wish[] = [
     {
       id: "bore",
       text: bore,
       anchorX: boreAt,
       anchorY: axis - halfBore,
-      places: inside ? [1, -1].map((s) => ({ x: boreAt + s * (8 + boreHalf), y: axis - 5 })) : [],
+      places:
+        halfBore >= 17
+          ? [1, -1].map((s) => ({ x: boreAt + s * (8 + boreHalf), y: axis - 9 }))
+          : [over(boreAt, 14)],
     },
   ];
-  if (stroke) {
+  if (stroke && (halfBore >= STROKE_TEXT_FROM || frame.width > 600)) {
     const label = `air stroke ${text.bare(stroke.stroke_m)} peak to peak at ${text.frequency(stroke.frequency_hz)}`;
     const short = `stroke ${text.bare(stroke.stroke_m)} at ${text.frequency(stroke.frequency_hz)}`;
     const long = x(section.profile.end) - x(section.profile.mouth) >= textWidth(label) + 12;
+    const middle = (stroke.x0 + stroke.x1) / 2;
     wishes.push({
       id: "stroke",
       text: long ? label : short,
-      anchorX: (stroke.x0 + stroke.x1) / 2,
+      anchorX: middle,
       anchorY: stroke.y,
-      places: halfBore >= 32 ? [{ x: (stroke.x0 + stroke.x1) / 2, y: stroke.y + 16 }] : [],
+      places:
+        halfBore >= STROKE_TEXT_FROM
+          ? [0, 24, -24, 48, -48].map((aside) => ({ x: middle + aside, y: stroke.y + 15 }))
+          : [over(middle, 14), over(middle, 30)],
     });
   }
   for (const ghost of ghosts) {

@@ -119,24 +119,7 @@ export function drawDimensions(
   }
   const mouth = at(overall.x0);
   const end = at(overall.x1);
-  const staggered = placeLabels(
-    small.map(({ id, text, x0, x1 }) => ({
-      id,
-      text,
-      anchorX: (at(x0) + at(x1)) / 2,
-      anchorY: y1,
-      optional: chain.length > 14,
-    })),
-    {
-      direction: 1,
-      startY: y1 + 18,
-      minX: 4,
-      maxX: frame.width - 4,
-      rows: 5,
-      obstacles: [upright(mouth, y1), upright(end, y1)],
-      beside: false,
-    },
-  );
+  const staggered = stagger(small, frame, y1, [mouth, end]);
   labels.push(...staggered);
   const lowest = Math.max(y1 + 6, ...staggered.map((label) => label.box.y1));
   const y2 = lowest + 20;
@@ -152,6 +135,54 @@ export function drawDimensions(
     if (leader)
       marks.lines += `M${sheetNumber(leader.x0)} ${sheetNumber(leader.y0)}L${sheetNumber(leader.x1)} ${sheetNumber(leader.y1)}`;
   return { ...marks, labels, bottom: y2 + 6, warn: (section.clearance ?? 0) < 0 };
+}
+
+/** Rows that short dimensions may take below their line. */
+const STAGGER_ROWS = 5;
+
+/**
+ * Texts of dimensions too short to carry them, in rows below the line. Tried with the longest
+ * first, from the left, from the right, and once more without the word for the glue; what then
+ * still finds no place is left to the table.
+ */
+function stagger(
+  small: Dimension[],
+  { transform, width }: SheetFrame,
+  y: number,
+  witnesses: number[],
+): PlacedLabel[] {
+  const at = transform.x;
+  const orders: ((dimension: Dimension) => number)[] = [
+    ({ x0, x1 }) => Math.round(Math.abs(at(x1) - at(x0))),
+    () => 0,
+    ({ x0 }) => x0,
+  ];
+  let best: PlacedLabel[] = [];
+  for (const glue of [true, false])
+    for (const priority of orders) {
+      const placed = placeLabels(
+        small.map((dimension) => ({
+          id: dimension.id,
+          text: glue ? dimension.text : dimension.text.replace(" + glue", ""),
+          anchorX: (at(dimension.x0) + at(dimension.x1)) / 2,
+          anchorY: y,
+          priority: priority(dimension),
+          optional: true,
+        })),
+        {
+          direction: 1,
+          startY: y + 18,
+          minX: 4,
+          maxX: width - 4,
+          rows: STAGGER_ROWS,
+          obstacles: witnesses.map((x) => upright(x, y)),
+          beside: false,
+        },
+      );
+      if (placed.length === small.length) return placed;
+      if (placed.length > best.length) best = placed;
+    }
+  return best;
 }
 
 function plainLabel({ id, text }: Dimension, x: number, y: number): PlacedLabel {

@@ -57,11 +57,16 @@ export function handlesOf(
   const context: HandleContext = { design, ventIndex, vent, section, text, free, spare };
   return [
     tubeHandle(context),
-    section.slot ? null : stackHandle(context),
+    canStack(vent, section) ? stackHandle(context) : null,
     outerFlareHandle(context),
     innerFlareHandle(context),
     wallHandle(context),
   ].filter((handle): handle is Handle => handle !== null);
+}
+
+/** Rings go on a round vent, and not behind a moulded trumpet. */
+function canStack(vent: AirwayVent, section: Section): boolean {
+  return section.slot === null && (section.shellWall === null || ringsOf(vent) > 0);
 }
 
 interface HandleContext {
@@ -215,10 +220,10 @@ function innerFlareHandle({ design, ventIndex, vent, section, text }: HandleCont
         ? "A cut flare must leave wood inside the last piece."
         : "A flare is no deeper than the vent is long.",
     x: profile.end,
-    y: -(profile.endRadius + profile.innerFlare),
+    y: (section.slot ? 1 : -1) * (profile.endRadius + profile.innerFlare),
     perInwards: -0.001,
-    perOutwards: -0.001,
-    cursor: "nesw-resize",
+    perOutwards: section.slot ? 0.001 : -0.001,
+    cursor: section.slot ? "nwse-resize" : "nesw-resize",
     ...lengths(text),
     edit: (radius) => setInnerFlare(design, ventIndex, radius),
   };

@@ -17,6 +17,8 @@ export interface LabelRequest {
   /** What the label names. */
   anchorX: number;
   anchorY: number;
+  /** Placed before those of a lower one; equal ones from the left. */
+  priority?: number;
   /** Left out, rather than forced into a further row, where no place is free. */
   optional?: boolean;
 }
@@ -66,7 +68,10 @@ export function boxesOverlap(a: Box, b: Box, pad = 0): boolean {
 /** Places each request in turn, from the left; what could be placed, in that order. */
 export function placeLabels(requests: LabelRequest[], room: PlacingRoom): PlacedLabel[] {
   const placed: PlacedLabel[] = [];
-  const ordered = [...requests].sort((a, b) => a.anchorX - b.anchorX || a.anchorY - b.anchorY);
+  const ordered = [...requests].sort(
+    (a, b) =>
+      (b.priority ?? 0) - (a.priority ?? 0) || a.anchorX - b.anchorX || a.anchorY - b.anchorY,
+  );
   for (const request of ordered) {
     const label =
       cheapest(request, room, placed) ?? (request.optional ? null : force(request, room, placed));
@@ -121,7 +126,7 @@ function labelAt(
   const x = Math.max(room.minX + half, Math.min(room.maxX - half, wanted));
   const box = textBox(text, x, y);
   const nearX = Math.max(box.x0 + 2, Math.min(box.x1 - 2, anchorX));
-  const nearY = room.direction < 0 ? box.y1 : box.y0;
+  const nearY = room.direction < 0 ? box.y1 + 1 : box.y0 - 1;
   const leader = withLeader ? { x0: anchorX, y0: anchorY, x1: nearX, y1: nearY } : null;
   return { id, text, x, y, box, leader };
 }

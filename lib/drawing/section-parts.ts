@@ -7,7 +7,15 @@ import {
   trumpetOutline,
 } from "./bore-profile";
 import type { Outline, OutlinePoint, Side } from "./outline";
-import { holeCylinder, panelHole, type Section, type SectionPiece, type Span } from "./section";
+import {
+  holeCylinder,
+  insideAbove,
+  panelHole,
+  sharedSides,
+  type Section,
+  type SectionPiece,
+  type Span,
+} from "./section";
 
 export type PartKind = "panel" | "tube" | "rings" | "plate" | "bend" | "wall" | "side";
 
@@ -49,8 +57,7 @@ export function sectionParts(
   breakDepth: number,
 ): SectionPart[] {
   const top = edgeOf(section, panelHalf, breakDepth);
-  const floor = section.slot !== null && section.slot.shared >= 1;
-  const ceiling = section.slot !== null && section.slot.shared >= 4;
+  const { floor, ceiling } = sharedSides(section);
   const parts: SectionPart[] = [];
   if (!ceiling) parts.push(panelPart(section, top, floor ? "above" : "both"));
   const wall = wallPart(section, top);
@@ -59,9 +66,10 @@ export function sectionParts(
   const half = section.slot ? section.slot.height / 2 : 0;
   if (floor) parts.push(sidePart("floor", "below", section, half, far));
   if (ceiling) parts.push(sidePart("ceiling", "above", section, half, far));
-  if (section.insideHalf !== null && section.insideHalf + section.board <= panelHalf + 1e-6) {
-    if (!floor) parts.push(sidePart("low", "below", section, section.insideHalf, far));
-    if (!ceiling) parts.push(sidePart("high", "above", section, section.insideHalf, far));
+  const inside = insideAbove(section);
+  if (inside !== null && inside + section.board <= panelHalf + 1e-6) {
+    if (!floor) parts.push(sidePart("low", "below", section, inside, far));
+    if (!ceiling) parts.push(sidePart("high", "above", section, inside, far));
   }
   const side: Side = ceiling ? "both" : floor ? "above" : "both";
   if (!ceiling) for (const piece of section.pieces) parts.push(piecePart(section, piece, side));
@@ -70,11 +78,8 @@ export function sectionParts(
 
 /** Outer edge of a panel: straight where the box ends, a wave where the drawing breaks it off. */
 function edgeOf(section: Section, half: number, depth: number): (x: number, span: Span) => number {
-  const ends = section.insideHalf !== null && section.insideHalf + section.board <= half + 1e-6;
-  if (ends && section.insideHalf !== null) {
-    const limit = section.insideHalf;
-    return () => limit;
-  }
+  const inside = insideAbove(section);
+  if (inside !== null && inside + section.board <= half + 1e-6) return () => inside;
   return (x, { x0, x1 }) =>
     half - depth * (0.5 - 0.5 * Math.sin((2 * Math.PI * (x - x0)) / (x1 - x0)));
 }
@@ -216,28 +221,33 @@ function wallPart(section: Section, top: (x: number, span: Span) => number): Sec
   if (section.clearance === null) return null;
   const x0 = section.profile.end + section.clearance;
   const span: Span = { x0, x1: x0 + section.board };
-  const floor = section.slot !== null && section.slot.shared >= 1;
+  const { floor } = sharedSides(section);
   const half = section.slot ? section.slot.height / 2 : 0;
+  const foot = floor ? -half : null;
+  const edge = waveEdge(span, span, top);
   const outline: Outline = [
-    ...waveEdge(span, span, top),
-    { x: span.x1, y: 0 },
-    { x: span.x0, y: 0 },
+    ...edge,
+    ...(foot === null
+      ? edge.map(({ x, y }) => ({ x, y: -y })).reverse()
+      : [
+          { x: span.x1, y: foot },
+          { x: span.x0, y: foot },
+        ]),
   ];
-  const below: Outline = [
-    { x: span.x0, y: half },
-    { x: span.x1, y: half },
-    { x: span.x1, y: 0 },
-    { x: span.x0, y: 0 },
-  ];
-  const sheet: Sheet = { ...span, from: () => 0, to: (x) => top(x, span), along: false };
+  const sheet: Sheet = {
+    ...span,
+    from: (x) => foot ?? -top(x, span),
+    to: (x) => top(x, span),
+    along: false,
+  };
   return {
     id: "wall",
     kind: "wall",
     piece: null,
-    side: floor ? "above" : "both",
+    side: "above",
     wooden: true,
-    outlines: floor ? [outline, below.map((p) => ({ ...p, y: -p.y }))] : [outline],
-    sheets: floor ? [{ ...sheet, from: () => -half }] : [sheet],
+    outlines: [outline],
+    sheets: [sheet],
     glue: [],
     ...span,
     outer: top(span.x0, span),

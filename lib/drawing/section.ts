@@ -165,6 +165,21 @@ function piecesOf(
   return pieces;
 }
 
+/** Whether the slot's lower side, or its upper one too, is a panel of the box. */
+export function sharedSides({ slot }: Section): { floor: boolean; ceiling: boolean } {
+  return { floor: slot !== null && slot.shared >= 1, ceiling: slot !== null && slot.shared >= 4 };
+}
+
+/**
+ * From the axis up to the box's inside [mm], null where unknown: the vent is drawn in the middle of
+ * the box, a slot that shares the floor on the floor.
+ */
+export function insideAbove(section: Section): number | null {
+  const { insideHalf, slot } = section;
+  if (insideHalf === null) return null;
+  return slot && sharedSides(section).floor ? 2 * insideHalf - slot.height / 2 : insideHalf;
+}
+
 /** Radius of the hole in the panel at x, what stands in it and the flare in its wood included [mm]. */
 export function panelHole(section: Section, x: number): number {
   const { profile, mouldedWall } = section;

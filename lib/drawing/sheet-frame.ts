@@ -1,6 +1,6 @@
 /** How a section sits on its sheet: scale, where the axis runs, where long clearances are broken off. */
 import type { SheetTransform } from "./outline";
-import type { Section, Span } from "./section";
+import { insideAbove, sharedSides, type Section, type Span } from "./section";
 
 export interface SheetRoom {
   /** Size of the sheet [CSS px]. */
@@ -16,6 +16,9 @@ export interface FrameHold {
   scale: number;
   origin: number;
   gap: Span | null;
+  /** Room that lettering had taken above and below. */
+  above: number;
+  below: number;
 }
 
 export interface SheetFrame extends SheetRoom {
@@ -34,6 +37,10 @@ export interface SheetFrame extends SheetRoom {
 const WIDE_SHEET_PX = 600;
 /** Panels are shown at most this much farther than what must be seen. */
 const PANEL_SPARE = 1.9;
+/** … or this share of the room, whichever is more. */
+const PANEL_SHARE = 0.85;
+/** Shown below a slot's floor panel [mm]. */
+const FLOOR_SPARE_MM = 4;
 
 /** Ghost air is drawn no longer than this many bores. */
 export const LONGEST_GHOST_BORES = 1.2;
@@ -54,7 +61,7 @@ export function frameOf(
   const { profile, clearance, board } = section;
   const gap = hold ? hold.gap : gapOf(section);
   const cut = gap ? gap.x1 - gap.x0 : 0;
-  const side = room.width > WIDE_SHEET_PX ? 84 : 18;
+  const side = room.width > WIDE_SHEET_PX ? 84 : 36;
   const left = Math.min(profile.mouth - ghosts.outer, 0);
   const wallEnd = clearance === null ? -Infinity : profile.end + clearance + board;
   const right = Math.max(
@@ -76,17 +83,27 @@ export function frameOf(
     const shown = !gap || x_mm <= gap.x0 ? x_mm : Math.max(gap.x0, x_mm - cut);
     return origin + shown * scale;
   };
-  const box = section.insideHalf === null ? Infinity : section.insideHalf + board;
-  const halfPx = Math.min(across / 2, seen * PANEL_SPARE * scale, Math.max(box, seen) * scale);
-  const axis = room.above + across / 2;
+  const inside = insideAbove(section);
+  const box = inside === null ? Infinity : Math.max(inside + board, seen);
+  const { floor } = sharedSides(section);
+  const below = floor ? (section.reach + FLOOR_SPARE_MM) * scale : Infinity;
+  const half = across / 2;
+  const roomAbove = floor ? Math.max(half, across - below) : half;
+  const up = Math.min(
+    roomAbove,
+    Math.max(seen * PANEL_SPARE * scale, PANEL_SHARE * roomAbove),
+    box * scale,
+  );
+  const down = Math.min(up, below);
+  const axis = room.above + (across - up - down) / 2 + up;
   return {
     ...room,
     transform: { scale, x, axis },
-    panelHalf: halfPx / scale,
-    top: axis - halfPx,
-    bottom: axis + halfPx,
+    panelHalf: up / scale,
+    top: axis - up,
+    bottom: axis + down,
     gap,
-    hold: { scale, origin, gap },
+    hold: { scale, origin, gap, above: room.above, below: room.below },
   };
 }
 

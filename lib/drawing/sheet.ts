@@ -60,6 +60,7 @@ const FIRST_ROOM = { above: 46, below: 62 };
 /** Lays out the sheet; lettering that needs more rows takes them from the section's own room. */
 export function layOutSheet(request: SheetRequest): Sheet {
   const section = sectionOf(request.vent, request.enclosure, request.layers);
+  if (request.hold) return attempt(request, section, request.hold);
   let room = FIRST_ROOM;
   let sheet = attempt(request, section, room);
   for (let round = 0; round < 2; round++) {
@@ -87,7 +88,7 @@ function attempt(
   const inner = ghostLength(section, ends?.inner ?? 0);
   const frame = frameOf(
     section,
-    { width: request.width, height: request.height, ...room },
+    { width: request.width, height: request.height, above: room.above, below: room.below },
     { outer, inner },
     request.hold,
   );
@@ -200,11 +201,11 @@ function strokeOf(
   };
 }
 
-/** The bore's dimension line stands a third of the way in, clear of the flare. */
+/** The bore's dimension line stands near the mouth, clear of the flare. */
 function boreLineAt({ profile }: Section, { transform }: SheetFrame): number {
   const from = profile.mouth + profile.outerFlare;
   const to = profile.end - profile.innerFlare;
-  return transform.x(from < to ? from + (to - from) * 0.3 : (profile.mouth + profile.end) / 2);
+  return transform.x(from < to ? from + (to - from) * 0.12 : (profile.mouth + profile.end) / 2);
 }
 
 function breakMarks(section: Section, frame: SheetFrame): string {
