@@ -39,7 +39,7 @@ export function AirView({ sheet, id }: { sheet: Sheet; id: string }) {
           <g clipPath={`url(#${id}-air)`}>
             <rect
               className={styles.slug}
-              style={{ "--half": `${sheetNumber((stroke.x1 - stroke.x0) / 2)}px` } as CSSProperties}
+              style={{ "--half": `${sheetNumber(stroke.half)}px` } as CSSProperties}
               x={sheetNumber((stroke.x0 + stroke.x1) / 2 - stroke.slug)}
               y={sheetNumber(bore.y0)}
               width={sheetNumber(2 * stroke.slug)}
@@ -50,7 +50,7 @@ export function AirView({ sheet, id }: { sheet: Sheet; id: string }) {
             className={styles.stroke}
             d={`M${sheetNumber(stroke.x0)} ${sheetNumber(stroke.y)}H${sheetNumber(stroke.x1)}`}
           />
-          {stroke.x1 - stroke.x0 > 24 && (
+          {stroke.whole && stroke.half > 12 && (
             <path
               className={styles.strokeHead}
               d={`M${sheetNumber(stroke.x0)} ${sheetNumber(stroke.y)}l9 -3.4v6.8zM${sheetNumber(stroke.x1)} ${sheetNumber(stroke.y)}l-9 -3.4v6.8z`}

@@ -28,9 +28,12 @@ export interface AirStroke {
   stroke_m: number;
   speed_m_s: number;
   frequency_hz: number;
-  /** Sheet positions of the arrow's ends, of its line, and half the slug's width. */
+  /** Sheet positions of the arrow's ends, cut off at the sheet's edges (whole: nothing cut off). */
   x0: number;
   x1: number;
+  whole: boolean;
+  /** Half the stroke on the sheet, the height of its line, and half the slug's width. */
+  half: number;
   y: number;
   slug: number;
 }
@@ -77,7 +80,8 @@ export function placeAnnotations(
     minX: 4,
     maxX: frame.width - 4,
     rows: 5,
-    obstacles: [...solids, ...kept, ...placed.map((label) => label.box)],
+    obstacles: [...solids, ...kept],
+    before: placed,
     beside: true,
   });
   return [...placed, ...above];
@@ -98,19 +102,21 @@ function reservedBoxes(
 
 /** What a part covers above and below the axis; one box where it crosses it. */
 function partBoxes(part: SectionPart, { transform }: SheetFrame): Box[] {
-  const heights = part.outlines.flat().map((point) => point.y);
-  const low = Math.min(...heights);
-  const high = Math.max(...heights);
-  const box = (from: number, to: number): Box => ({
-    x0: transform.x(part.x0),
-    x1: transform.x(part.x1),
-    y0: transform.axis - to * transform.scale,
-    y1: transform.axis - from * transform.scale,
+  return part.outlines.flatMap((outline) => {
+    const across = outline.map((point) => point.y);
+    const along = outline.map((point) => transform.x(point.x));
+    const box = (from: number, to: number): Box => ({
+      x0: Math.min(...along),
+      x1: Math.max(...along),
+      y0: transform.axis - to * transform.scale,
+      y1: transform.axis - from * transform.scale,
+    });
+    const [low, high] = [Math.min(...across), Math.max(...across)];
+    return [
+      ...(part.side !== "below" ? [box(low, high)] : []),
+      ...(part.side !== "above" ? [box(-high, -low)] : []),
+    ];
   });
-  const boxes: Box[] = [];
-  if (part.side !== "below") boxes.push(box(low, high));
-  if (part.side !== "above") boxes.push(box(-high, -low));
-  return boxes;
 }
 
 function labelAt(wish: Wish, x: number, y: number, withLeader: boolean): PlacedLabel {
@@ -191,7 +197,10 @@ function airWishes(
       anchorY: axis - halfBore,
       places:
         halfBore >= 17
-          ? [1, -1].map((s) => ({ x: boreAt + s * (8 + boreHalf), y: axis - 9 }))
+          ? [
+              ...[1, -1].map((s) => ({ x: boreAt + s * (8 + boreHalf), y: axis - 9 })),
+              over(boreAt, 14),
+            ]
           : [over(boreAt, 14)],
     },
   ];

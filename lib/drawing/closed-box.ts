@@ -26,7 +26,11 @@ export function layOutClosedBox(
   const section = closedSection(enclosure, layers);
   const room = { width, height, above: 24, below: 24 };
   const { transform, panelHalf } = frameOf(section, room, { outer: 0, inner: 0 });
-  const parts = sectionParts(section, panelHalf, 5 / transform.scale).map((part) => ({
+  const parts = sectionParts(
+    section,
+    panelHalf,
+    Math.min(5 / transform.scale, 0.3 * section.panel),
+  ).map((part) => ({
     id: part.id,
     kind: part.kind,
     piece: part.piece,

@@ -36,7 +36,7 @@ export function chainOf(section: Section, vent: AirwayVent, text: DrawingText): 
     const span = { id: `piece-${piece.index}`, x0: piece.x0, x1: piece.x1, length_m };
     if (given?.kind === "rings") {
       const glue = given.glue_line_m > 0 ? " + glue" : "";
-      const sum = `${given.count} × ${text.bare(given.thickness_m)}${glue} = ${text.bare(length_m)}`;
+      const sum = `${given.count} × ${text.sheet(given.thickness_m)}${glue} = ${text.bare(length_m)}`;
       return { ...span, text: sum, name: "Rings" };
     }
     if (given?.kind === "bend")

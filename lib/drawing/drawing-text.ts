@@ -5,6 +5,8 @@ import type { UnitPreferences } from "@/lib/units/preferences";
 export interface DrawingText {
   /** A length in the drawing's unit, bare. */
   bare: (length_m: number) => string;
+  /** A sheet's thickness, bare: a caliper reading is not rounded to the tape. */
+  sheet: (length_m: number) => string;
   /** A length with its unit. */
   full: (length_m: number) => string;
   /** A length with its sign, bare. */
@@ -27,6 +29,8 @@ export function drawingText(preferences: UnitPreferences): DrawingText {
   const tapeMark = INCH_M / preferences.tape;
   return {
     bare: (value) => length(value).value,
+    sheet: (value) =>
+      formatQuantity(value, "length", preferences, imperial ? { digits: 2 } : {}).value,
     full: (value) => length(value).text,
     signed: (value) => length(value, true).value,
     frequency: (value) => formatQuantity(value, "frequency", preferences).text,

@@ -42,6 +42,8 @@ export interface PlacingRoom {
   maxX: number;
   rows: number;
   obstacles: Box[];
+  /** Lettering that already stands: no text and no leader may meet it. */
+  before?: PlacedLabel[];
   /** Try the place right beside the anchor first, without a leader. */
   beside: boolean;
 }
@@ -111,7 +113,10 @@ function force(request: LabelRequest, room: PlacingRoom, placed: PlacedLabel[]):
   for (let row = room.rows; ; row++) {
     const baseline = room.startY + room.direction * row * ROW_HEIGHT;
     const label = labelAt(request, room, request.anchorX, baseline, true);
-    if (!placed.some((other) => boxesOverlap(label.box, other.box, PAD))) return label;
+    if (
+      ![...placed, ...(room.before ?? [])].some((other) => boxesOverlap(label.box, other.box, PAD))
+    )
+      return label;
   }
 }
 
@@ -134,7 +139,7 @@ function labelAt(
 function free(label: PlacedLabel, room: PlacingRoom, placed: PlacedLabel[]): boolean {
   if (label.box.x0 < room.minX - 0.5 || label.box.x1 > room.maxX + 0.5) return false;
   if (room.obstacles.some((obstacle) => boxesOverlap(label.box, obstacle, 1))) return false;
-  return placed.every(
+  return [...placed, ...(room.before ?? [])].every(
     (other) =>
       !boxesOverlap(label.box, other.box, PAD) &&
       !(label.leader && crosses(label.leader, other.box)) &&

@@ -90,19 +90,23 @@ function panelPart(
   side: Side,
 ): SectionPart {
   const whole: Span = { x0: 0, x1: section.panel };
+  const closed = section.pieces.length === 0;
   return {
     id: "panel",
     kind: "panel",
     piece: null,
-    side,
+    side: closed ? "above" : side,
     wooden: true,
-    outlines: section.layers.map((layer) => [
-      ...waveEdge(whole, layer, top),
-      ...holeEdge(section, layer),
-    ]),
+    outlines: section.layers.map((layer) => {
+      const edge = waveEdge(whole, layer, top);
+      const foot = closed
+        ? edge.map(({ x, y }) => ({ x, y: -y })).reverse()
+        : holeEdge(section, layer);
+      return [...edge, ...foot];
+    }),
     sheets: section.layers.map((layer) => ({
       ...layer,
-      from: (x) => panelHole(section, x),
+      from: (x) => (closed ? -top(x, whole) : panelHole(section, x)),
       to: (x) => top(x, whole),
       along: false,
     })),

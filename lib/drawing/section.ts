@@ -116,11 +116,12 @@ export function sectionOf(vent: AirwayVent, enclosure: Enclosure, layers?: numbe
       : null,
     reach: 0,
   };
+  const hole = Math.max(...[0, panel / 2, panel].map((x) => panelHole(section, x)));
   section.reach = Math.max(
     profile.mouthRadius + profile.outerFlare,
     profile.endRadius + profile.innerFlare + (section.shellWall ?? 0),
     ...pieces.map((piece) => piece.outer),
-    1,
+    slot ? 1 : hole * PANEL_RIM,
   );
   return section;
 }
@@ -199,6 +200,9 @@ export function holeCylinder(section: Section, x: number): number {
   const last = pieces[pieces.length - 1];
   return Math.max(last?.outer ?? 0, profile.endRadius + profile.innerFlare) * RECESS;
 }
+
+/** Panel that must be seen around its hole, of the hole's radius. */
+const PANEL_RIM = 1.2;
 
 /** How much wider than the vent the recess behind a vent is drawn that ends inside its panel. */
 const RECESS = 1.25;

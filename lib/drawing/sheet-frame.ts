@@ -110,7 +110,7 @@ export function frameOf(
 /** A clearance much longer than the vent is broken off, as a long shaft would be. */
 function gapOf(section: Section): Span | null {
   const { profile, clearance, overall } = section;
-  if (clearance === null) return null;
+  if (clearance === null || section.pieces.length === 0) return null;
   const limit = Math.max(4.4 * profile.endRadius, 0.9 * overall, 80);
   if (clearance <= limit) return null;
   const shown = 0.7 * limit;

@@ -94,7 +94,7 @@ function attempt(
   );
   const { transform } = frame;
   const { profile } = section;
-  const parts = sectionParts(section, frame.panelHalf, 5 / transform.scale);
+  const parts = sectionParts(section, frame.panelHalf, breakDepth(section, frame));
   const ghosts: GhostAir[] = [];
   if (ends && Math.abs(ends.outer) > 1e-5)
     ghosts.push(ghost("outer", ends.outer, outer, section, frame));
@@ -150,6 +150,11 @@ function attempt(
   };
 }
 
+/** Depth of the wave of a broken panel edge [mm]: 5 on the sheet, less on a thin panel. */
+function breakDepth({ panel }: Section, { transform }: SheetFrame): number {
+  return Math.min(5 / transform.scale, 0.3 * panel);
+}
+
 function ghost(
   end: "outer" | "inner",
   correction_m: number,
@@ -181,7 +186,7 @@ export function airStroke(speed_m_s: number, frequency_hz: number): number {
 function strokeOf(
   figures: VentAnswer | null,
   { profile }: Section,
-  { transform }: SheetFrame,
+  { transform, width }: SheetFrame,
   halfBore: number,
 ): AirStroke | null {
   const peak = figures?.peak_air_speed;
@@ -190,12 +195,16 @@ function strokeOf(
   const half = (stroke_m * 1000 * transform.scale) / 2;
   if (!(half > 1)) return null;
   const middle = (transform.x(profile.mouth) + transform.x(profile.end)) / 2;
+  const left = Math.max(middle - half, 4);
+  const right = Math.min(middle + half, width - 4);
   return {
     stroke_m,
     speed_m_s: peak.speed_m_s,
     frequency_hz: peak.frequency_hz,
-    x0: middle - half,
-    x1: middle + half,
+    x0: left,
+    x1: right,
+    half,
+    whole: right - left >= 2 * half - 1e-6,
     y: transform.axis + halfBore * 0.28,
     slug: Math.max(3, Math.min(0.45 * halfBore, half * 0.8)),
   };
