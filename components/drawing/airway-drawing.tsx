@@ -103,7 +103,7 @@ export function AirwayDrawing(props: AirwayDrawingProps) {
         </svg>
       </div>
       <figcaption className="flex flex-wrap items-end justify-between gap-x-4 gap-y-1 px-3 pb-1">
-        <div className="flex min-w-0 flex-1 flex-wrap items-center gap-x-4 gap-y-1">
+        <div className="flex min-w-0 grow basis-full flex-wrap items-center gap-x-4 gap-y-1 sm:basis-0">
           <ViewControls zoom={view.zoom} onZoom={zoomBy} onFit={reset} />
           <DimensionTable rows={dimensionRows(section, airway, figures, text)} summary={summary} />
           {props.children}

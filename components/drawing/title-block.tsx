@@ -27,13 +27,13 @@ export function TitleBlock({
     ["Checked", text.checkedBy],
   ];
   return (
-    <dl className="lettering grid grid-cols-2 sm:grid-cols-3 border-t border-l border-rule text-xs">
+    <dl className="lettering flex flex-wrap sm:max-w-108 border-t border-l border-rule text-xs">
       {cells
         .filter((cell): cell is [string, string] => cell[1] !== undefined)
         .map(([name, value]) => (
           <div
             key={name}
-            className="flex gap-1.5 border-r border-b border-rule px-2 py-0.5 whitespace-nowrap"
+            className="flex grow gap-1.5 border-r border-b border-rule px-2 py-0.5 whitespace-nowrap"
           >
             <dt className="text-ink-2">{name}</dt>
             <dd>{value}</dd>

@@ -8,6 +8,7 @@ import {
   type LabelRequest,
   type PlacedLabel,
 } from "./place-labels";
+import { gripBoxes, partBoxes, reservedBoxes } from "./reserved-boxes";
 import type { Section } from "./section";
 import type { SectionPart } from "./section-parts";
 import type { SheetFrame } from "./sheet-frame";
@@ -59,7 +60,7 @@ export function placeAnnotations(
   ];
   const placed: PlacedLabel[] = [];
   const leftOver: LabelRequest[] = [];
-  const kept = reservedBoxes(frame, air);
+  const kept = [...reservedBoxes(frame, air), ...gripBoxes(section, frame)];
   for (const wish of wishes) {
     const found = wish.places
       .map(({ x, y, leader }) => labelAt(wish, x, y, leader ?? false))
@@ -85,38 +86,6 @@ export function placeAnnotations(
     beside: true,
   });
   return [...placed, ...above];
-}
-
-/** Lines that lettering beside the axis keeps clear of. */
-function reservedBoxes(
-  frame: SheetFrame,
-  air: { stroke: AirStroke | null; boreAt: number },
-): Box[] {
-  const { axis } = frame.transform;
-  const boxes: Box[] = [{ x0: -1e5, x1: 1e5, y0: axis - 0.5, y1: axis + 0.5 }];
-  const { stroke, boreAt } = air;
-  boxes.push({ x0: boreAt - 1, x1: boreAt + 1, y0: axis, y1: axis + 1e4 });
-  if (stroke) boxes.push({ x0: stroke.x0, x1: stroke.x1, y0: stroke.y - 2, y1: stroke.y + 2 });
-  return boxes;
-}
-
-/** What a part covers above and below the axis; one box where it crosses it. */
-function partBoxes(part: SectionPart, { transform }: SheetFrame): Box[] {
-  return part.outlines.flatMap((outline) => {
-    const across = outline.map((point) => point.y);
-    const along = outline.map((point) => transform.x(point.x));
-    const box = (from: number, to: number): Box => ({
-      x0: Math.min(...along),
-      x1: Math.max(...along),
-      y0: transform.axis - to * transform.scale,
-      y1: transform.axis - from * transform.scale,
-    });
-    const [low, high] = [Math.min(...across), Math.max(...across)];
-    return [
-      ...(part.side !== "below" ? [box(low, high)] : []),
-      ...(part.side !== "above" ? [box(-high, -low)] : []),
-    ];
-  });
 }
 
 function labelAt(wish: Wish, x: number, y: number, withLeader: boolean): PlacedLabel {

@@ -2,7 +2,7 @@
 import type { AirwayVent } from "@/lib/document/schema";
 import type { DrawingText } from "./drawing-text";
 import { sheetNumber } from "./outline";
-import { placeLabels, textBox, type Box, type PlacedLabel } from "./place-labels";
+import { boxesOverlap, placeLabels, textBox, type Box, type PlacedLabel } from "./place-labels";
 import type { Section } from "./section";
 import type { SheetFrame } from "./sheet-frame";
 import { textWidth } from "./text-width";
@@ -113,8 +113,10 @@ export function drawDimensions(
     witnesses.set(left, y1 + 4);
     witnesses.set(right, y1 + 4);
     drawSpan(marks, left, right, y1);
-    if (textWidth(dimension.text) + 8 <= right - left)
-      labels.push(plainLabel(dimension, (left + right) / 2, y1 - TEXT_LIFT));
+    const label = plainLabel(dimension, (left + right) / 2, y1 - TEXT_LIFT);
+    const fits = textWidth(dimension.text) + 8 <= right - left;
+    // A vent too long for its box is dimensioned over its own pieces.
+    if (fits && !labels.some(({ box }) => boxesOverlap(box, label.box, 3))) labels.push(label);
     else small.push(dimension);
   }
   const mouth = at(overall.x0);
@@ -125,8 +127,10 @@ export function drawDimensions(
   const y2 = lowest + 20;
   drawSpan(marks, mouth, end, y2);
   const half = textWidth(overall.text) / 2;
-  const middle = Math.max(half + 4, Math.min(frame.width - half - 4, (mouth + end) / 2));
-  labels.push(plainLabel(overall, middle, y2 - TEXT_LIFT));
+  const fits = 2 * half + 8 <= end - mouth;
+  const beside = end + 10 + 2 * half < frame.width - 4 ? end + 10 + half : mouth - 10 - half;
+  const middle = fits ? (mouth + end) / 2 : Math.max(half + 4, beside);
+  labels.push(plainLabel(overall, middle, fits ? y2 - TEXT_LIFT : y2 + 4));
   witnesses.set(mouth, y2 + 4);
   witnesses.set(end, y2 + 4);
   for (const [x, to] of witnesses)
