@@ -1,6 +1,7 @@
 import type { Metadata } from "next";
 import Link from "next/link";
 import { DesignList } from "@/components/designs/design-list";
+import { QueryProvider } from "@/components/designs/query-provider";
 import { EmptyState } from "@/components/ui/empty-state";
 import { currentSession, requireShop } from "@/lib/accounts/session";
 import { listDesigns } from "@/lib/designs/data";
@@ -23,7 +24,9 @@ export default async function DesignsPage() {
           </Link>
         )}
       </header>
-      <DesignList first={await listDesigns(shop)} canEdit={canEdit} />
+      <QueryProvider>
+        <DesignList first={await listDesigns(shop)} canEdit={canEdit} />
+      </QueryProvider>
     </main>
   );
 }

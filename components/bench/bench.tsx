@@ -1,16 +1,23 @@
 "use client";
 
+import dynamic from "next/dynamic";
 import { useEffect, useState, type ReactNode } from "react";
 import { BenchHeader } from "./bench-header";
-import { BoreMapPanel } from "./bore-map-panel";
 import { CurvesRegion } from "./curves-region";
 import { DrawingRegion } from "./drawing-region";
-import { JigPanel } from "./jig-panel";
 import { KeyFigures } from "./key-figures";
 import { MarginsList } from "./margins-list";
 import { NumbersColumn } from "./numbers/numbers-column";
-import { RingStack } from "./ring-stack";
 import { useUndoKeys } from "./use-undo-keys";
+
+// What plans and cuts comes once the drawing answers.
+const RingStack = dynamic(() => import("./ring-stack").then((part) => part.RingStack), {
+  ssr: false,
+});
+const BoreMapPanel = dynamic(() => import("./bore-map-panel").then((part) => part.BoreMapPanel), {
+  ssr: false,
+});
+const JigPanel = dynamic(() => import("./jig-panel").then((part) => part.JigPanel), { ssr: false });
 
 interface BenchProps {
   canEdit: boolean;

@@ -1,7 +1,7 @@
 "use client";
 
 import { Moment } from "@/components/ui/moment";
-import { createDesign } from "@/lib/designs/query-options";
+import { createDesign } from "@/lib/designs/requests";
 import { showToast } from "@/components/ui/toasts";
 import { useBenchStore } from "./bench-context";
 import type { Autosave } from "./use-autosave";

@@ -2,7 +2,7 @@
 
 import { useEffect, useRef, useState } from "react";
 import type { SavedDesign } from "@/lib/designs/contract";
-import { saveDesign } from "@/lib/designs/query-options";
+import { saveDesign } from "@/lib/designs/requests";
 import { AskError } from "@/lib/platform/ask";
 import { useBenchStore } from "./bench-context";
 

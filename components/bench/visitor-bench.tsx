@@ -4,7 +4,7 @@ import { useRouter } from "next/navigation";
 import { useEffect, useState } from "react";
 import Link from "next/link";
 import { keepInBrowser, readVisitorDraft } from "@/lib/bench/draft";
-import { createDesign } from "@/lib/designs/query-options";
+import { createDesign } from "@/lib/designs/requests";
 import type { Design } from "@/lib/document/schema";
 import { showToast } from "@/components/ui/toasts";
 import { Bench } from "./bench";

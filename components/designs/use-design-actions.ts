@@ -3,13 +3,8 @@
 import { useQueryClient, type InfiniteData } from "@tanstack/react-query";
 import { showToast } from "@/components/ui/toasts";
 import type { DesignPage, SavedDesign } from "@/lib/designs/contract";
-import {
-  deleteDesign,
-  designsKey,
-  duplicateDesign,
-  renameDesign,
-  restoreDesign,
-} from "@/lib/designs/query-options";
+import { designsKey } from "@/lib/designs/query-options";
+import { deleteDesign, duplicateDesign, renameDesign, restoreDesign } from "@/lib/designs/requests";
 
 type Pages = InfiniteData<DesignPage, string | null>;
 

@@ -1,8 +1,7 @@
-/** How the client reads and writes designs: TanStack Query options over the routes. */
+/** How the client reads designs: TanStack Query options over the routes. */
 import { infiniteQueryOptions } from "@tanstack/react-query";
-import type { Design } from "@/lib/document/schema";
 import { ask } from "@/lib/platform/ask";
-import type { DesignPage, SavedDesign } from "./contract";
+import type { DesignPage } from "./contract";
 
 export const designsKey = ["designs"] as const;
 
@@ -17,20 +16,3 @@ export function designsQuery() {
     getNextPageParam: (page) => page.next,
   });
 }
-
-export const createDesign = (document: Design) =>
-  ask<SavedDesign>("/api/designs", { method: "POST", body: { document } });
-
-export const saveDesign = (id: string, version: number, document: Design) =>
-  ask<SavedDesign>(`/api/designs/${id}`, { method: "PUT", body: { version, document } });
-
-export const renameDesign = (id: string, name: string) =>
-  ask<SavedDesign>(`/api/designs/${id}`, { method: "PATCH", body: { name } });
-
-export const deleteDesign = (id: string) => ask<null>(`/api/designs/${id}`, { method: "DELETE" });
-
-export const restoreDesign = (id: string) =>
-  ask<SavedDesign>(`/api/designs/${id}/restore`, { method: "POST" });
-
-export const duplicateDesign = (id: string) =>
-  ask<SavedDesign>(`/api/designs/${id}/duplicate`, { method: "POST" });
