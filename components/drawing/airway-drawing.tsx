@@ -30,8 +30,21 @@ interface AirwayDrawingProps extends SectionDrawingProps {
 }
 
 /** The section of a vent, with handles, names, title block and table. */
-export function AirwayDrawing(props: AirwayDrawingProps) {
-  const { design, vent, airway, answer, preferences, selected, onSelect, id, size } = props;
+export function AirwayDrawing({ room, ...props }: AirwayDrawingProps) {
+  const {
+    design,
+    vent,
+    airway,
+    answer,
+    preferences,
+    selected,
+    onSelect,
+    id,
+    size,
+    room,
+    title,
+    children,
+  } = props;
   const [pointed, setPointed] = useState<string | null>(null);
   const [reason, setReason] = useState<string | null>(null);
   const [hold, setHold] = useState<FrameHold | undefined>();
@@ -77,7 +90,7 @@ export function AirwayDrawing(props: AirwayDrawingProps) {
   const summary = sectionSummary(section, airway, figures, text);
   return (
     <>
-      <div ref={props.room} className="relative min-h-0 flex-1 overflow-hidden">
+      <div ref={room} className="relative min-h-0 flex-1 overflow-hidden">
         <svg
           className={`${styles.svg} absolute inset-0 h-full w-full`}
           style={{ touchAction: view.zoom > 1 ? "none" : "pan-y" }}
@@ -106,13 +119,13 @@ export function AirwayDrawing(props: AirwayDrawingProps) {
         <div className="flex min-w-0 grow basis-full flex-wrap items-center gap-x-4 gap-y-1 sm:basis-0">
           <ViewControls zoom={view.zoom} onZoom={zoomBy} onFit={reset} />
           <DimensionTable rows={dimensionRows(section, airway, figures, text)} summary={summary} />
-          {props.children}
+          {children}
           <p className="lettering min-h-5 text-xs text-ink-2" role="status">
             {reason ?? pointed ?? ""}
           </p>
         </div>
         <TitleBlock
-          text={props.title ?? {}}
+          text={title ?? {}}
           scale={scaleName(frame.transform.scale)}
           units={text.units}
         />

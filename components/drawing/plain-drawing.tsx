@@ -22,8 +22,9 @@ interface PlainDrawingProps extends SectionDrawingProps {
 }
 
 /** A box with no airway to cut: closed, or with a vent given as a bare circuit element. */
-export function PlainDrawing(props: PlainDrawingProps) {
-  const { design, lumped, preferences, onSelect, selected, id, size } = props;
+export function PlainDrawing({ room, ...props }: PlainDrawingProps) {
+  const { design, lumped, preferences, onSelect, selected, id, size, room, title, children } =
+    props;
   const text = useMemo(() => drawingText(preferences), [preferences]);
   const { enclosure } = design;
   const box = useMemo(
@@ -38,7 +39,7 @@ export function PlainDrawing(props: PlainDrawingProps) {
   const y = sheetNumber(box.axis);
   return (
     <>
-      <div ref={props.room} className="relative min-h-0 flex-1 overflow-hidden">
+      <div ref={room} className="relative min-h-0 flex-1 overflow-hidden">
         <svg
           className={`${styles.svg} absolute inset-0 h-full w-full`}
           viewBox={`0 0 ${size.width} ${size.height}`}
@@ -79,9 +80,9 @@ export function PlainDrawing(props: PlainDrawingProps) {
         </svg>
       </div>
       <figcaption className="flex flex-wrap items-end justify-between gap-x-4 gap-y-1 px-3 pb-1">
-        <div className="flex min-w-0 flex-1 items-center gap-4">{props.children}</div>
+        <div className="flex min-w-0 flex-1 items-center gap-4">{children}</div>
         <TitleBlock
-          text={{ drawing: "Enclosure, section", ...props.title }}
+          text={{ drawing: "Enclosure, section", ...title }}
           scale={scaleName(box.scale)}
           units={text.units}
         />

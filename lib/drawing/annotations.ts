@@ -4,7 +4,6 @@ import {
   boxesOverlap,
   placeLabels,
   textBox,
-  type Box,
   type LabelRequest,
   type PlacedLabel,
 } from "./place-labels";
