@@ -30,7 +30,7 @@ interface AirwayDrawingProps extends SectionDrawingProps {
 }
 
 /** The section of a vent, with handles, names, title block and table. */
-export function AirwayDrawing({ room, ...props }: AirwayDrawingProps) {
+export function AirwayDrawing(props: AirwayDrawingProps) {
   const {
     design,
     vent,
@@ -41,7 +41,6 @@ export function AirwayDrawing({ room, ...props }: AirwayDrawingProps) {
     onSelect,
     id,
     size,
-    room,
     title,
     children,
   } = props;
