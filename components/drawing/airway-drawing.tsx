@@ -30,7 +30,7 @@ interface AirwayDrawingProps extends SectionDrawingProps {
 }
 
 /** The section of a vent, with handles, names, title block and table. */
-export function AirwayDrawing(props: AirwayDrawingProps) {
+export function AirwayDrawing({ room, ...props }: AirwayDrawingProps) {
   const {
     design,
     vent,

@@ -22,7 +22,7 @@ interface PlainDrawingProps extends SectionDrawingProps {
 }
 
 /** A box with no airway to cut: closed, or with a vent given as a bare circuit element. */
-export function PlainDrawing(props: PlainDrawingProps) {
+export function PlainDrawing({ room, ...props }: PlainDrawingProps) {
   const { design, lumped, preferences, onSelect, selected, id, size, title, children } = props;
   const text = useMemo(() => drawingText(preferences), [preferences]);
   const { enclosure } = design;
