@@ -30,7 +30,7 @@ interface AirwayDrawingProps extends SectionDrawingProps {
 }
 
 /** The section of a vent, with handles, names, title block and table. */
-export function AirwayDrawing({ room, ...props }: AirwayDrawingProps) {
+export function AirwayDrawing(props: AirwayDrawingProps) {
   const {
     design,
     vent,
@@ -43,6 +43,9 @@ export function AirwayDrawing({ room, ...props }: AirwayDrawingProps) {
     size,
     title,
     children,
+    layers,
+    onChange,
+    room,
   } = props;
   const [pointed, setPointed] = useState<string | null>(null);
   const [reason, setReason] = useState<string | null>(null);
@@ -62,17 +65,16 @@ export function AirwayDrawing({ room, ...props }: AirwayDrawingProps) {
         text,
         width,
         height,
-        layers: props.layers,
+        layers: layers,
         hold,
       }),
-    [airway, enclosure, figures, text, width, height, props.layers, hold],
+    [airway, enclosure, figures, text, width, height, layers, hold],
   );
   const { section, frame } = sheet;
-  const bindings = useHandles(design, frame.hold, props.onChange, setReason, setHold);
+  const bindings = useHandles(design, frame.hold, onChange, setReason, setHold);
   const places = useMemo(
-    () =>
-      props.onChange ? placeHandles(handlesOf(design, vent, section, text), frame.transform) : [],
-    [props.onChange, design, vent, section, text, frame],
+    () => (onChange ? placeHandles(handlesOf(design, vent, section, text), frame.transform) : []),
+    [onChange, design, vent, section, text, frame],
   );
   const nameOf = useMemo(
     () => (part: string) => partName(part, section, airway, text),

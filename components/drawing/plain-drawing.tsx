@@ -7,6 +7,7 @@ import { layOutClosedBox, type DrawnPart } from "@/lib/drawing/closed-box";
 import { sheetNumber } from "@/lib/drawing/outline";
 import { scaleName } from "@/lib/drawing/sheet-frame";
 import { formatQuantity } from "@/lib/units/format";
+import type { UnitPreferences } from "@/lib/units/preferences";
 import { PartView } from "./section-parts-view";
 import styles from "./section.module.css";
 import type { SectionDrawingProps } from "./section-drawing";
@@ -22,15 +23,27 @@ interface PlainDrawingProps extends SectionDrawingProps {
 }
 
 /** A box with no airway to cut: closed, or with a vent given as a bare circuit element. */
-export function PlainDrawing({ room, ...props }: PlainDrawingProps) {
-  const { design, lumped, preferences, onSelect, selected, id, size, title, children } = props;
+export function PlainDrawing(props: PlainDrawingProps) {
+  const {
+    design,
+    lumped,
+    preferences,
+    onSelect,
+    selected,
+    id,
+    size,
+    title,
+    layers,
+    children,
+    room,
+  } = props;
   const text = useMemo(() => drawingText(preferences), [preferences]);
   const { enclosure } = design;
   const box = useMemo(
-    () => layOutClosedBox(enclosure, size.width, size.height, props.layers),
-    [enclosure, size, props.layers],
+    () => layOutClosedBox(enclosure, size.width, size.height, layers),
+    [enclosure, size, layers],
   );
-  const said = lumped ? elementLines(lumped, props) : ["Closed box: no vent"];
+  const said = lumped ? elementLines(lumped, preferences) : ["Closed box: no vent"];
   const pick = onSelect
     ? (part: DrawnPart) => onSelect({ piece: null, kind: part.kind })
     : undefined;
@@ -92,7 +105,7 @@ export function PlainDrawing({ room, ...props }: PlainDrawingProps) {
 
 function ignore() {}
 
-function elementLines(vent: LumpedVent, { preferences }: SectionDrawingProps): string[] {
+function elementLines(vent: LumpedVent, preferences: UnitPreferences): string[] {
   const { inertance_kg_m4, resistance_pa_s_m3, area_m2 } = vent.lumped;
   return [
     `${vent.name}: a bare element, nothing to cut`,
