@@ -9,6 +9,7 @@ import { KeyFigures } from "./key-figures";
 import { MarginsList } from "./margins-list";
 import { NumbersColumn } from "./numbers/numbers-column";
 import { useUndoKeys } from "./use-undo-keys";
+import { WhenNear } from "./when-near";
 
 // What plans and cuts comes once the drawing answers.
 const RingStack = dynamic(() => import("./ring-stack").then((part) => part.RingStack), {
@@ -53,8 +54,12 @@ export function Bench({ canEdit, state, actions, revision, drawn }: BenchProps) 
           {ready && (
             <>
               <RingStack />
-              <BoreMapPanel />
-              <JigPanel />
+              <WhenNear name="bore-map">
+                <BoreMapPanel />
+              </WhenNear>
+              <WhenNear name="jig">
+                <JigPanel />
+              </WhenNear>
             </>
           )}
         </div>

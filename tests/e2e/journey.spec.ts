@@ -21,6 +21,7 @@ test("a new person: own driver and box, port from the bore map, rings, sign up, 
   });
 
   await test.step("port from the bore map", async () => {
+    await page.locator('[data-part="bore-map"]').scrollIntoViewIfNeeded();
     const map = page.getByRole("slider", { name: "Vent diameter and number of vents" }).first();
     await map.scrollIntoViewIfNeeded();
     await map.focus();
