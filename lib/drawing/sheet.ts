@@ -85,7 +85,8 @@ function attempt(
   const { figures, text } = request;
   const ends = figures?.end_corrections_m;
   const outer = ghostLength(section, ends?.outer ?? 0);
-  const inner = ghostLength(section, ends?.inner ?? 0);
+  const behind = Math.max(0, section.clearance ?? Infinity);
+  const inner = Math.min(ghostLength(section, ends?.inner ?? 0), behind);
   const frame = frameOf(
     section,
     { width: request.width, height: request.height, above: room.above, below: room.below },

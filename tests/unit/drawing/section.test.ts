@@ -6,6 +6,7 @@ import {
   solidOutline,
 } from "@/lib/drawing/bore-profile";
 import { plyCount } from "@/lib/drawing/plies";
+import { ringSheets } from "@/lib/drawing/ring-stack";
 import { insideAbove, panelHole, sectionOf } from "@/lib/drawing/section";
 import { sectionParts } from "@/lib/drawing/section-parts";
 import { airway, designWith, stackedVent } from "./designs";
@@ -119,5 +120,13 @@ describe("plies", () => {
     expect(plyCount(18, 4)).toBe(13);
     expect(plyCount(18, 0.5)).toBe(7);
     expect(plyCount(18, 0.1)).toBe(1);
+  });
+});
+
+describe("a bare stack", () => {
+  it("lays rings end to end", () => {
+    const { sheets, length } = ringSheets([0.018, 0.018, 0.012], 40);
+    expect(length).toBeCloseTo(48, 9);
+    expect(sheets[2]?.x0).toBeCloseTo(36, 9);
   });
 });

@@ -67,6 +67,14 @@ describe("the sheet", () => {
     expect(sheet.dimensions.labels.some(({ text }) => text.startsWith("clear 2727.4"))).toBe(true);
   });
 
+  it("ends the inner ghost air at the wall", () => {
+    const sheet = sheetOf(designWith({ ...stackedVent, clearance_m: 0.01 }));
+    const inner = sheet.ghosts.find(({ end }) => end === "inner");
+    const { x } = sheet.frame.transform;
+    expect(inner?.to).toBeCloseTo(x(308.6 + 10), 6);
+    expect(inner?.correction_m).toBe(0.027);
+  });
+
   it("keeps its frame while a hand holds it", () => {
     const before = sheetOf(designWith(stackedVent));
     const longer = designWith({ ...stackedVent, pieces: [{ kind: "tube", length_m: 0.4 }] });
