@@ -14,6 +14,7 @@ import { WhenNear } from "./when-near";
 // What plans and cuts comes once the drawing answers.
 const RingStack = dynamic(() => import("./ring-stack").then((part) => part.RingStack), {
   ssr: false,
+  loading: () => <div className="ring-stack-place" aria-hidden="true" />,
 });
 const BoreMapPanel = dynamic(() => import("./bore-map-panel").then((part) => part.BoreMapPanel), {
   ssr: false,
