@@ -41,6 +41,8 @@ export interface AirStroke {
 interface Wish extends LabelRequest {
   /** Places tried before the rows above: middle of the text and baseline. */
   places: { x: number; y: number; leader?: boolean }[];
+  /** Left to the table rather than lettered in a row above. */
+  besideOnly?: boolean;
 }
 
 /** Places every annotation; those beside their part first, the rest in rows above. */
@@ -72,7 +74,7 @@ export function placeAnnotations(
           ),
       );
     if (found) placed.push(found);
-    else leftOver.push(wish);
+    else if (!wish.besideOnly) leftOver.push(wish);
   }
   const above = placeLabels(leftOver, {
     direction: -1,
@@ -182,9 +184,12 @@ function airWishes(
       text: long ? label : short,
       anchorX: middle,
       anchorY: stroke.y,
+      besideOnly: frame.width <= 600,
       places:
         halfBore >= STROKE_TEXT_FROM
-          ? [0, 24, -24, 48, -48].map((aside) => ({ x: middle + aside, y: stroke.y + 15 }))
+          ? [stroke.y + 15, axis - 9].flatMap((y) =>
+              [0, 24, -24, 48, -48, 72].map((aside) => ({ x: middle + aside, y })),
+            )
           : [over(middle, 14), over(middle, 30)],
     });
   }

@@ -127,10 +127,18 @@ export function drawDimensions(
   const y2 = lowest + 20;
   drawSpan(marks, mouth, end, y2);
   const half = textWidth(overall.text) / 2;
-  const fits = 2 * half + 8 <= end - mouth;
-  const beside = end + 10 + 2 * half < frame.width - 4 ? end + 10 + half : mouth - 10 - half;
-  const middle = fits ? (mouth + end) / 2 : Math.max(half + 4, beside);
-  labels.push(plainLabel(overall, middle, fits ? y2 - TEXT_LIFT : y2 + 4));
+  const right = end + 10 + half;
+  const left = mouth - 10 - half;
+  const aside =
+    2 * half + 4 <= end - mouth
+      ? null
+      : right + half < frame.width - 4
+        ? right
+        : left - half > 4
+          ? left
+          : null;
+  const middle = aside ?? Math.max(half + 4, Math.min(frame.width - half - 4, (mouth + end) / 2));
+  labels.push(plainLabel(overall, middle, aside === null ? y2 - TEXT_LIFT : y2 + 4));
   witnesses.set(mouth, y2 + 4);
   witnesses.set(end, y2 + 4);
   for (const [x, to] of witnesses)

@@ -46,8 +46,8 @@ for (const scheme of ["light", "dark"] as const)
     await signIn(page, "designer@demo.example", DEMO);
     await page.waitForURL(/\/designs/);
     await visit("/designs");
-    const first = await page.locator('a[href^="/bench/"]').first().getAttribute("href");
-    await visit(first ?? "");
+    const saved = page.getByRole("link", { name: "Den sub" }).first();
+    await visit((await saved.getAttribute("href")) ?? "");
     expect(faults).toEqual([]);
     await context.close();
   });
