@@ -28,6 +28,11 @@ export function evaluate(design: Design, options: EvaluateOptions = {}): Answer 
   );
   const notes = [...requestNotes(options), ...vents.flatMap((vent) => vent.notes)];
   const tuning_hz = tuningFrequency(design.enclosure, vents, air);
+  if (tuning_hz === null && vents.length > 0)
+    notes.push({
+      code: "no_tuning",
+      message: "The vents have no resonance with this enclosure: friction drowns it.",
+    });
   let curves: Curves | null = null;
   let peaks: PeakSpeed[] = [];
   if (hasDriver(design) && design.drive.voltage_v > 0) {

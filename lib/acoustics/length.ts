@@ -1,4 +1,5 @@
 import type { Design } from "@/lib/document/schema";
+import { pieceLength } from "./airway";
 import type { Note } from "./answer";
 import { InputError } from "./input-error";
 import { tuningOf } from "./tuning";
@@ -48,17 +49,7 @@ export function lengthForTuning(
     ),
   });
   const overallRest = vent.pieces.reduce(
-    (sum, piece, j) =>
-      sum +
-      (j === at
-        ? 0
-        : piece.kind === "rings"
-          ? piece.count * (piece.thickness_m + piece.glue_line_m)
-          : piece.kind === "plate"
-            ? piece.thickness_m + piece.glue_line_m
-            : piece.kind === "tube"
-              ? piece.length_m
-              : 0),
+    (sum, piece, j) => sum + (j === at ? 0 : pieceLength(piece, vent.bore)),
     0,
   );
   const flares = vent.outer_end.flare_radius_m + vent.inner_end.flare_radius_m;

@@ -25,6 +25,8 @@ export function tuningFrequency(
   for (let i = 0; i < 60 && total(hi) < 0; i++) hi *= 1.1;
   let flo = total(lo),
     fhi = total(hi);
+  // Friction can drown the resonance: the total then never changes sign.
+  if (!(flo <= 0 && fhi >= 0)) return null;
   for (let i = 0; i < 60; i++) {
     const mid = i < 8 ? lo - (flo * (hi - lo)) / (fhi - flo) : (lo + hi) / 2;
     const fm = total(mid);
